@@ -1,0 +1,127 @@
+package hissledger.choose;
+
+import hissledger.circuit.AmplifierStage;
+import hissledger.circuit.FrontEnd;
+import hissledger.circuit.PathElement;
+import hissledger.circuit.Source;
+import hissledger.circuit.Stage;
+import hissledger.device.AmplifierModel;
+import hissledger.device.BiasedBipolar;
+import hissledger.device.BiasedJfet;
+import hissledger.device.BipolarModel;
+import hissledger.device.Device;
+import hissledger.device.JfetModel;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
+
+/**
+ * A candidate placed in its scenario with its device resolved: a front end whose quiescent current alone is open. A
+ * behavioural amplifier has none; it is the same at every current.
+ *
+ * @param candidate the candidate
+ * @param source the transducer
+ * @param path all passive elements before the stage
+ * @param stage the stage at a given current of each device, A
+ * @param range the currents that a search may try
+ * @param defaultsUsed what had to be assumed for the device, one sentence each
+ */
+public record Design(
+        Candidate candidate,
+        Source source,
+        List<PathElement> path,
+        DoubleFunction<Stage> stage,
+        CurrentRange range,
+        List<String> defaultsUsed) {
+    /** Least current that a search tries where nothing else bounds it, A. */
+    public static final double LEAST_AMPS = 1e-6;
+
+    /** Greatest current that a search tries where nothing else bounds it, A. */
+    public static final double GREATEST_AMPS = 0.1;
+
+    private static final double DECADE = 10.0;
+
+    public Design {
+        path = List.copyOf(path);
+        defaultsUsed = List.copyOf(defaultsUsed);
+    }
+
+    /**
+     * Resolves a candidate of a scenario.
+     *
+     * @throws hissledger.device.IncompleteDeviceException where its device lacks a parameter that has no default
+     */
+    public static Design of(Scenario scenario, Candidate candidate) {
+        List<PathElement> path = new ArrayList<>(scenario.path());
+        path.addAll(candidate.path());
+        Device device = candidate.device();
+        double kelvin = scenario.temperatureKelvin();
+        CurrentRange free =
+                new CurrentRange(LEAST_AMPS, "least current tried", GREATEST_AMPS, "greatest current tried");
+        if (device.ratedAmps().isPresent()) {
+            free = free.atMost(device.ratedAmps().getAsDouble(), "current rating of " + device.id());
+        }
+        DoubleFunction<Stage> stage;
+        List<String> defaults;
+        switch (device.kind()) {
+            case BIPOLAR -> {
+                Device.Resolved<BipolarModel> resolved = device.bipolar();
+                stage = amps -> candidate.plan().with(new BiasedBipolar(resolved.model(), amps, kelvin));
+                defaults = resolved.defaultsUsed();
+                free = withinGainPoints(device, free);
+            }
+            case JFET -> {
+                Device.Resolved<JfetModel> resolved = device.jfet();
+                stage = amps -> candidate.plan().with(new BiasedJfet(resolved.model(), amps, kelvin));
+                defaults = resolved.defaultsUsed();
+                free = free.atMost(resolved.model().law().saturationAmps(), "typical IDSS of " + device.id());
+            }
+            case AMPLIFIER -> {
+                Device.Resolved<AmplifierModel> resolved = device.amplifier();
+                stage = amps -> new AmplifierStage(resolved.model());
+                defaults = resolved.defaultsUsed();
+            }
+            default -> throw new IllegalStateException("unknown kind of device: " + device.kind());
+        }
+        return new Design(candidate, scenario.source(), path, stage, asked(candidate, free), defaults);
+    }
+
+    /** The gain curve is continued for one decade beyond its points; a search does not leave that. */
+    private static CurrentRange withinGainPoints(Device device, CurrentRange range) {
+        return device.currentGain()
+                .filter(gain -> gain.points().size() > 1)
+                .map(gain -> {
+                    double first = gain.points().get(0).currentAmps();
+                    double last = gain.points().get(gain.points().size() - 1).currentAmps();
+                    String why = "one decade beyond the published current gain of " + device.id();
+                    return range.atLeast(first / DECADE, why).atMost(last * DECADE, why);
+                })
+                .orElse(range);
+    }
+
+    private static CurrentRange asked(Candidate candidate, CurrentRange free) {
+        if (!(candidate.current() instanceof CurrentChoice.Optimum)) {
+            return free;
+        }
+        CurrentChoice.Optimum optimum = (CurrentChoice.Optimum) candidate.current();
+        CurrentRange range = free;
+        OptionalDouble from = optimum.fromAmps();
+        OptionalDouble to = optimum.toAmps();
+        String why = "range given in the scenario";
+        if (from.isPresent()) {
+            range = range.atLeast(from.getAsDouble(), why);
+        }
+        return to.isPresent() ? range.atMost(to.getAsDouble(), why) : range;
+    }
+
+    /** The front end at a quiescent current of each device, A. */
+    public FrontEnd at(double amps) {
+        return new FrontEnd(source, path, stage.apply(amps));
+    }
+
+    /** This design behind another source. */
+    public Design withSource(Source other) {
+        return new Design(candidate, other, path, stage, range, defaultsUsed);
+    }
+}
