@@ -1,0 +1,130 @@
+package hissledger.cli;
+
+import hissledger.chart.ComparisonChart;
+import hissledger.chart.Picture;
+import hissledger.choose.Comparison;
+import hissledger.choose.Evaluation;
+import hissledger.choose.ResistanceSweep;
+import hissledger.choose.Scenario;
+import hissledger.files.InputException;
+import hissledger.files.SafeWrite;
+import hissledger.ledger.Figure;
+import hissledger.report.CompareText;
+import hissledger.report.Csv;
+import hissledger.report.ResultTree;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** Candidates side by side. */
+@Command(
+        name = "compare",
+        mixinStandardHelpOptions = true,
+        sortOptions = false,
+        description =
+                "Candidates side by side, quietest first, with the deciding sentence and the chart for the review.",
+        footer = {
+            "",
+            "Examples:",
+            "  hissledger compare scenarios/vocal-dynamic.json --chart vocal.png",
+            "  hissledger compare scenarios/vocal-dynamic.json --chart vocal-rs.png --chart-kind resistance"
+        })
+final class CompareVerb implements Callable<Integer> {
+    /** The pictures of a comparison. */
+    enum ChartKind {
+        /** EIN density against frequency. */
+        DENSITY,
+        /** EIN over the band against source resistance. */
+        RESISTANCE;
+
+        @Override
+        public String toString() {
+            return name().toLowerCase(Locale.ROOT);
+        }
+    }
+
+    private static final int CHART_WIDTH = 1600;
+    private static final int CHART_HEIGHT = 1000;
+    private static final int SWEEP_POINTS_PER_DECADE = 6;
+    private static final String PNG = ".png";
+
+    @Mixin
+    private Inputs inputs = new Inputs();
+
+    @Option(
+            names = "--by",
+            paramLabel = "FIGURE",
+            description = "the figure to sort by: einFlat, einA, ein468, einPlayback, einPlaybackA, noiseFigure or "
+                    + "equivalentNoiseLevel (default: the first that the target limits, else einFlat)")
+    private Optional<String> by = Optional.empty();
+
+    @Mixin
+    private Outputs outputs = new Outputs();
+
+    @Option(names = "--chart", paramLabel = "FILE.png", description = "write the chart as PNG, 1600 x 1000 pixels")
+    private Optional<Path> chart = Optional.empty();
+
+    @Option(
+            names = "--chart-kind",
+            paramLabel = "KIND",
+            description = "density: EIN density against frequency (default); resistance: EIN against source resistance")
+    private ChartKind chartKind = ChartKind.DENSITY;
+
+    @Option(names = "--check", description = "exit with 1 if the quietest candidate misses the target of the scenario")
+    private boolean check;
+
+    @Spec
+    private CommandSpec spec = CommandSpec.create();
+
+    @Override
+    public Integer call() throws InputException {
+        if (chart.isPresent()
+                && !chart.get().toString().toLowerCase(Locale.ROOT).endsWith(PNG)) {
+            throw new ParameterException(
+                    spec.commandLine(), "--chart writes PNG: give a file name that ends in .png, not " + chart.get());
+        }
+        Scenario scenario = inputs.read();
+        Comparison comparison = Comparison.of(scenario, figure(scenario));
+        if (chart.isPresent()) {
+            SafeWrite.bytes(chart.get(), picture(comparison).png(CHART_WIDTH, CHART_HEIGHT));
+        }
+        outputs.write(
+                spec.commandLine().getOut(),
+                CompareText.of(comparison),
+                () -> ResultTree.comparison(comparison),
+                () -> Csv.comparison(comparison));
+        boolean missed = comparison.winner().marginDecibels(scenario.target()).orElse(0.0) < 0.0;
+        return check && missed ? ExitCode.TARGET_MISSED : ExitCode.DONE;
+    }
+
+    private Figure figure(Scenario scenario) {
+        return by.isPresent() ? Arguments.figure(spec, by.get()) : Comparison.decidingFigure(scenario);
+    }
+
+    private Picture picture(Comparison comparison) {
+        if (chartKind == ChartKind.DENSITY) {
+            return ComparisonChart.density(comparison);
+        }
+        List<Double> ohms = ResistanceSweep.grid(SWEEP_POINTS_PER_DECADE);
+        List<ResistanceSweep> sweeps = new ArrayList<>();
+        for (Evaluation evaluation : comparison.ranked()) {
+            sweeps.add(ResistanceSweep.of(
+                    comparison.scenario(), evaluation, ohms, comparison.figure().weighting()));
+        }
+        List<Double> floor = ResistanceSweep.floorVolts(
+                comparison.scenario(),
+                comparison.winner(),
+                ohms,
+                comparison.figure().weighting());
+        return ComparisonChart.resistance(comparison, sweeps, floor);
+    }
+}

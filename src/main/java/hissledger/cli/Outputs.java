@@ -1,0 +1,48 @@
+package hissledger.cli;
+
+import hissledger.files.InputException;
+import hissledger.files.JsonOut;
+import hissledger.files.SafeWrite;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Supplier;
+import picocli.CommandLine.Option;
+
+/** Where results go beside the text: {@code -} means standard output, in place of the text. */
+final class Outputs {
+    private static final String STANDARD_OUTPUT = "-";
+
+    @Option(names = "--json", paramLabel = "FILE", description = "write the result as JSON; - for standard output")
+    private Optional<String> json = Optional.empty();
+
+    @Option(names = "--csv", paramLabel = "FILE", description = "write the table as CSV; - for standard output")
+    private Optional<String> csv = Optional.empty();
+
+    /** Writes what was asked for: files first, then the text unless standard output carries data. */
+    void write(PrintWriter out, String text, Supplier<Map<String, Object>> tree, Supplier<String> table)
+            throws InputException {
+        boolean data = false;
+        if (json.isPresent()) {
+            data |= write(out, json.get(), JsonOut.text(tree.get()));
+        }
+        if (csv.isPresent()) {
+            data |= write(out, csv.get(), table.get());
+        }
+        if (!data) {
+            out.print(text);
+            out.flush();
+        }
+    }
+
+    private static boolean write(PrintWriter out, String target, String content) throws InputException {
+        if (target.equals(STANDARD_OUTPUT)) {
+            out.print(content);
+            out.flush();
+            return true;
+        }
+        SafeWrite.text(Path.of(target), content);
+        return false;
+    }
+}

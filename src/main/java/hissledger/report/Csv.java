@@ -1,0 +1,130 @@
+package hissledger.report;
+
+import hissledger.choose.Comparison;
+import hissledger.choose.Evaluation;
+import hissledger.choose.Scenario;
+import hissledger.choose.Target;
+import hissledger.ledger.Entry;
+import hissledger.ledger.EntrySpectrum;
+import hissledger.ledger.Totals;
+import hissledger.physics.Decibels;
+import hissledger.physics.Weighting;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** Results as CSV (RFC 4180): a header that names each column with its unit, SI values, decimal points, CRLF. */
+public final class Csv {
+    private static final String END = "\r\n";
+
+    private Csv() {}
+
+    /** One row a candidate, quietest first. */
+    public static String comparison(Comparison comparison) {
+        StringBuilder text = new StringBuilder();
+        record(
+                text,
+                List.of(
+                        "candidate",
+                        "device",
+                        "arrangement",
+                        "inParallel",
+                        "current_A",
+                        "currentIsBest",
+                        "einFlat_V",
+                        "einFlat_dBu",
+                        "einA_dBu",
+                        "aboveFloor_dB",
+                        "noiseFigure_dB",
+                        "einLowBand_dBu",
+                        "strongestEntry",
+                        "strongestEntrySaves_dB",
+                        "totalCurrent_A",
+                        "targetMargin_dB"));
+        Target target = comparison.scenario().target();
+        for (Evaluation evaluation : comparison.ranked()) {
+            Totals totals = evaluation.ledger().totals();
+            Entry strongest = evaluation.ledger().dominating();
+            OptionalDouble low = totals.lowBandVolts();
+            record(
+                    text,
+                    List.of(
+                            evaluation.name(),
+                            evaluation.candidate().device().id(),
+                            evaluation.candidate().plan().arrangement().label(),
+                            String.valueOf(evaluation.candidate().plan().inParallel()),
+                            number(evaluation.amps()),
+                            String.valueOf(evaluation.optimum().isPresent()),
+                            number(totals.ein(Weighting.FLAT)),
+                            number(Decibels.dbu(totals.ein(Weighting.FLAT))),
+                            number(Decibels.dbu(totals.ein(Weighting.A))),
+                            number(totals.aboveFloorDecibels()),
+                            number(totals.noiseFigureDecibels()),
+                            low.isPresent() ? number(Decibels.dbu(low.getAsDouble())) : "",
+                            strongest.name(),
+                            number(strongest.savesDecibels()),
+                            number(evaluation.ledger().frontEnd().stage().totalAmps()),
+                            number(evaluation.marginDecibels(target))));
+        }
+        return text.toString();
+    }
+
+    /** One row an entry of each candidate, largest first. */
+    public static String ledger(Scenario scenario, List<Evaluation> evaluations) {
+        StringBuilder text = new StringBuilder();
+        List<String> header = new ArrayList<>(List.of("candidate", "entry", "kind", "band_V", "share", "saves_dB"));
+        scenario.spotsHertz().forEach(spot -> header.add("at_" + number(spot) + "_Hz_V_rtHz"));
+        record(text, header);
+        for (Evaluation evaluation : evaluations) {
+            for (Entry entry : evaluation.ledger().entries()) {
+                List<String> cells = new ArrayList<>(List.of(
+                        evaluation.name(),
+                        entry.name(),
+                        entry.source().kind().label(),
+                        number(entry.bandVolts()),
+                        number(entry.share()),
+                        number(entry.savesDecibels())));
+                entry.spotVoltsPerRootHertz().forEach(density -> cells.add(number(density)));
+                record(text, cells);
+            }
+        }
+        return text.toString();
+    }
+
+    /** One row a frequency of one entry of each candidate. */
+    public static String entry(List<Evaluation> evaluations, List<EntrySpectrum> spectra) {
+        StringBuilder text = new StringBuilder();
+        record(text, List.of("candidate", "entry", "frequency_Hz", "entry_V_rtHz", "ein_V_rtHz"));
+        for (int c = 0; c < evaluations.size(); c++) {
+            EntrySpectrum spectrum = spectra.get(c);
+            for (int k = 0; k < spectrum.hertz().size(); k++) {
+                record(
+                        text,
+                        List.of(
+                                evaluations.get(c).name(),
+                                spectrum.name(),
+                                number(spectrum.hertz().get(k)),
+                                number(spectrum.entryVoltsPerRootHertz().get(k)),
+                                number(spectrum.einVoltsPerRootHertz().get(k))));
+            }
+        }
+        return text.toString();
+    }
+
+    private static String number(double value) {
+        return Double.isFinite(value) ? Double.toString(value) : "";
+    }
+
+    private static String number(OptionalDouble value) {
+        return value.isPresent() ? number(value.getAsDouble()) : "";
+    }
+
+    private static void record(StringBuilder text, List<String> cells) {
+        text.append(String.join(",", cells.stream().map(Csv::quoted).toList())).append(END);
+    }
+
+    private static String quoted(String cell) {
+        boolean plain = cell.chars().noneMatch(c -> c == ',' || c == '"' || c == '\n' || c == '\r');
+        return plain ? cell : '"' + cell.replace("\"", "\"\"") + '"';
+    }
+}

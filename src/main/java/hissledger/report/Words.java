@@ -1,0 +1,91 @@
+package hissledger.report;
+
+import hissledger.choose.Evaluation;
+import hissledger.choose.Scenario;
+import hissledger.files.Phrases;
+import hissledger.physics.Decibels;
+import hissledger.physics.Weighting;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.OptionalDouble;
+
+/** Values and conditions in words, the same in every report. */
+final class Words {
+    /** What is printed where a figure has no meaning. */
+    static final String NOT_DEFINED = "not defined";
+
+    /** Sentences are broken to this width. */
+    private static final int LINE_WIDTH = 110;
+
+    private Words() {}
+
+    /** A physical value in engineering notation. */
+    static String value(double value, String unit) {
+        return Phrases.value(value, unit);
+    }
+
+    /** A level or ratio with two decimals. */
+    static String decibels(double decibels) {
+        return String.format(Locale.ROOT, "%.2f", decibels);
+    }
+
+    /** A level or ratio with two decimals, or the words for one that has no meaning. */
+    static String decibels(OptionalDouble decibels) {
+        return decibels.isPresent() ? decibels(decibels.getAsDouble()) : NOT_DEFINED;
+    }
+
+    /** A voltage as a level in dBu. */
+    static String dbu(double volts) {
+        return decibels(Decibels.dbu(volts));
+    }
+
+    /** The lines that head every report: what the figures below them refer to. */
+    static List<String> conditions(Scenario scenario) {
+        return List.of(
+                "Source: " + Phrases.source(scenario.source()) + ". Path and stage at "
+                        + Phrases.temperature(scenario.temperatureKelvin()) + ".",
+                "Band " + Phrases.band(scenario.band())
+                        + ", unweighted unless said otherwise. EIN refers to the source's EMF and",
+                "includes the source's own noise; NF refers to a source at 290 K.");
+    }
+
+    /** Device and count, "2 x bf862". */
+    static String device(Evaluation evaluation) {
+        int count = evaluation.candidate().plan().inParallel();
+        String id = evaluation.candidate().device().id();
+        return count == 1 ? id : count + " x " + id;
+    }
+
+    /** A sentence broken into lines, those after the first set in. */
+    static List<String> wrapped(String sentence) {
+        List<String> lines = new ArrayList<>();
+        StringBuilder line = new StringBuilder();
+        for (String word : sentence.split(" ", -1)) {
+            if (line.length() + 1 + word.length() > LINE_WIDTH) {
+                lines.add(line.toString());
+                line = new StringBuilder("  ");
+            }
+            line.append(line.length() == 0 || line.toString().isBlank() ? "" : " ")
+                    .append(word);
+        }
+        lines.add(line.toString());
+        return lines;
+    }
+
+    /** The current of each device: as stated, or to three digits where a search found it. */
+    static String current(Evaluation evaluation) {
+        return evaluation.optimum().isPresent()
+                ? Phrases.value(evaluation.amps(), "A")
+                : Phrases.brief(evaluation.amps(), "A");
+    }
+
+    /** EIN under a weighting, in words. */
+    static String ein(Weighting weighting) {
+        return switch (weighting) {
+            case FLAT -> "EIN flat";
+            case A -> "EIN A-weighted";
+            default -> "EIN with " + weighting.label();
+        };
+    }
+}
