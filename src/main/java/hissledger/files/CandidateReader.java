@@ -29,12 +29,12 @@ final class CandidateReader {
 
     private final Fields fields;
     private final Faults faults;
-    private final List<Fault> elsewhere;
+    private final Set<Fault> elsewhere;
     private final Catalogue catalogue;
     private Optional<Device> device = Optional.empty();
     private Optional<CurrentChoice> current = Optional.empty();
 
-    CandidateReader(Fields fields, Faults faults, List<Fault> elsewhere, Catalogue catalogue) {
+    CandidateReader(Fields fields, Faults faults, Set<Fault> elsewhere, Catalogue catalogue) {
         this.fields = fields;
         this.faults = faults;
         this.elsewhere = elsewhere;
@@ -169,6 +169,10 @@ final class CandidateReader {
                     .read(node, faults)
                     .flatMap(open -> open.get(CandidateKeys.OPTIMUM))
                     .map(CandidateReader::optimum);
+        }
+        if (node.kind() == Node.Kind.TEXT && node.text().chars().noneMatch(Character::isDigit)) {
+            faults.at(node, "must be a current, like \"1.2 mA\", or \"" + OPTIMUM + "\", was " + node.quoted());
+            return Optional.empty();
         }
         return CandidateKeys.GIVEN_CURRENT.read(node, faults).map(CurrentChoice.Given::new);
     }

@@ -179,7 +179,10 @@ public final class DeviceReader {
             below = value.get().value();
             belowName = key.name();
         }
-        if (!stated) {
+        boolean requiredMissing = keys.stream()
+                .anyMatch(key ->
+                        key.required() && fields.node().member(key.name()).isEmpty());
+        if (!stated && !requiredMissing) {
             faults.at(fields.node(), "has no value; state at least one of min, typical and max");
         }
         return good && !belowName.isEmpty();

@@ -4,7 +4,7 @@ import java.util.List;
 
 /** What a physical value measures, and how its unit may be written. */
 enum Dimension {
-    RESISTANCE("a resistance", "Ω", "150 ohm", "ohm", "Ω", "Ω", "R"),
+    RESISTANCE("a resistance", "Ω", "150 ohm", "ohm", "Ω", "\u2126", "R"),
     CAPACITANCE("a capacitance", "F", "22 uF", "F"),
     INDUCTANCE("an inductance", "H", "0.6 mH", "H"),
     CURRENT("a current", "A", "1.2 mA", "A"),

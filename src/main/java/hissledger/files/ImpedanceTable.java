@@ -1,6 +1,5 @@
 package hissledger.files;
 
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -22,14 +21,14 @@ record ImpedanceTable(List<Double> hertz, List<Double> resistanceOhms, List<Doub
     /** Reads a file; what is wrong with it goes to {@code faults}, and the result is then empty. */
     static Optional<ImpedanceTable> read(Path file, List<Fault> faults) {
         String name = file.toString();
-        byte[] content;
+        String content;
         try {
-            content = JsonIn.bytes(file);
+            content = JsonIn.text(name, JsonIn.bytes(file));
         } catch (InputException fault) {
             faults.addAll(fault.faults());
             return Optional.empty();
         }
-        List<String> lines = new String(content, StandardCharsets.UTF_8).lines().toList();
+        List<String> lines = content.lines().toList();
         int line = 0;
         while (line < lines.size()
                 && (lines.get(line).isBlank() || lines.get(line).startsWith("#"))) {

@@ -6,8 +6,13 @@ import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
+import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import com.fasterxml.jackson.core.json.JsonReadFeature;
 import java.io.IOException;
+import java.io.InputStream;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
@@ -17,15 +22,19 @@ import java.util.List;
 /** Reads a JSON file, comments and trailing commas allowed, into a tree that knows the place of every key and value. */
 final class JsonIn {
     /** No file of this program comes near this size. */
-    private static final long MOST_BYTES = 5_000_000;
+    private static final int MOST_BYTES = 5_000_000;
 
     private static final int DEEPEST = 50;
+    private static final int LONGEST_NUMBER = 1000;
+    private static final String BYTE_ORDER_MARK = "\ufeff";
     private static final JsonFactory FACTORY = JsonFactory.builder()
             .enable(JsonReadFeature.ALLOW_JAVA_COMMENTS)
             .enable(JsonReadFeature.ALLOW_TRAILING_COMMA)
             .enable(JsonReadFeature.ALLOW_NON_NUMERIC_NUMBERS)
-            .streamReadConstraints(
-                    StreamReadConstraints.builder().maxNestingDepth(DEEPEST).build())
+            .streamReadConstraints(StreamReadConstraints.builder()
+                    .maxNestingDepth(DEEPEST)
+                    .maxNumberLength(LONGEST_NUMBER)
+                    .build())
             .build();
 
     private JsonIn() {}
@@ -39,12 +48,16 @@ final class JsonIn {
             }
             long size = Files.size(file);
             if (size > MOST_BYTES) {
-                throw InputException.of(
-                        name,
-                        "has " + size + " bytes, more than the " + MOST_BYTES
-                                + " that are read; is this the right file?");
+                throw tooLarge(name, "has " + size + " bytes");
             }
-            return Files.readAllBytes(file);
+            // a pipe or a device states no size
+            try (InputStream stream = Files.newInputStream(file)) {
+                byte[] content = stream.readNBytes(MOST_BYTES + 1);
+                if (content.length > MOST_BYTES) {
+                    throw tooLarge(name, "has more bytes than it states");
+                }
+                return content;
+            }
         } catch (NoSuchFileException missing) {
             throw InputException.of(name, "does not exist; check the path");
         } catch (IOException unreadable) {
@@ -52,14 +65,33 @@ final class JsonIn {
         }
     }
 
+    private static InputException tooLarge(String name, String size) {
+        return InputException.of(
+                name, size + ", more than the " + MOST_BYTES + " that are read; is this the right file?");
+    }
+
+    /** A file's content as text, without the byte order mark that some editors write. */
+    static String text(String file, byte[] content) throws InputException {
+        try {
+            String text = StandardCharsets.UTF_8
+                    .newDecoder()
+                    .decode(ByteBuffer.wrap(content))
+                    .toString();
+            return text.startsWith(BYTE_ORDER_MARK) ? text.substring(1) : text;
+        } catch (CharacterCodingException other) {
+            throw InputException.of(file, "is not text in UTF-8; save it in that encoding");
+        }
+    }
+
     /** The tree of a file's content. */
     static Node tree(String file, byte[] content) throws InputException {
         Faults faults = new Faults(file);
-        try (JsonParser parser = FACTORY.createParser(content)) {
+        // from characters, not bytes: columns count what the user sees
+        try (JsonParser parser = FACTORY.createParser(text(file, content))) {
             if (parser.nextToken() == null) {
                 throw InputException.of(file, "holds nothing; it should hold one JSON object { ... }");
             }
-            Node node = value(parser, "");
+            Node node = whole(parser, faults);
             if (parser.nextToken() != null) {
                 JsonLocation place = parser.currentTokenLocation();
                 faults.at(
@@ -79,6 +111,21 @@ final class JsonIn {
             throw new IllegalStateException("a fault was not thrown", broken);
         } catch (IOException impossible) {
             throw new IllegalStateException("reading from memory failed", impossible);
+        }
+    }
+
+    private static Node whole(JsonParser parser, Faults faults) throws IOException, InputException {
+        try {
+            return value(parser, "");
+        } catch (StreamConstraintsException beyond) {
+            JsonLocation place = parser.currentTokenLocation();
+            faults.at(
+                    place.getLineNr(),
+                    Math.max(1, place.getColumnNr()),
+                    "goes beyond what is read: objects and lists in each other to a depth of " + DEEPEST
+                            + ", numbers of " + LONGEST_NUMBER + " digits");
+            faults.throwIfAny();
+            throw new IllegalStateException("a fault was not thrown", beyond);
         }
     }
 

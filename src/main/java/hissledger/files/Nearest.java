@@ -18,11 +18,17 @@ public final class Nearest {
     public static List<String> of(String given, Collection<String> known) {
         String low = given.toLowerCase(Locale.ROOT);
         return known.stream()
-                .filter(word -> distance(low, word.toLowerCase(Locale.ROOT)) <= Math.max(1, word.length() / 3))
+                .filter(word -> Math.abs(word.length() - low.length()) <= farthest(word))
+                .filter(word -> distance(low, word.toLowerCase(Locale.ROOT)) <= farthest(word))
                 .sorted(Comparator.comparingInt((String word) -> distance(low, word.toLowerCase(Locale.ROOT)))
                         .thenComparing(Comparator.naturalOrder()))
                 .limit(MOST)
                 .toList();
+    }
+
+    /** A third of the letters, at least one, but never all of them. */
+    private static int farthest(String word) {
+        return Math.min(word.length() - 1, Math.max(1, word.length() / 3));
     }
 
     /** Insertions, deletions, changes and swaps of neighbours between two words (optimal string alignment). */

@@ -45,6 +45,8 @@ record Node(Kind kind, String text, String path, int line, int column, List<Memb
      */
     record Member(String name, int line, int column, Node value) {}
 
+    private static final int LONGEST_QUOTE = 60;
+
     Node {
         members = List.copyOf(members);
         items = List.copyOf(items);
@@ -61,10 +63,23 @@ record Node(Kind kind, String text, String path, int line, int column, List<Memb
         return found;
     }
 
+    /** A text in quotes for a message: on one line, and not longer than a reader wants to see. */
+    static String quote(String text) {
+        StringBuilder quoted = new StringBuilder("\"");
+        int end = Math.min(text.length(), LONGEST_QUOTE);
+        for (int k = 0; k < end; k++) {
+            char c = text.charAt(k);
+            quoted.append(Character.isISOControl(c) ? ' ' : c);
+        }
+        return quoted.append(text.length() > LONGEST_QUOTE ? "..." : "")
+                .append('"')
+                .toString();
+    }
+
     /** The value as a reader would quote it. */
     String quoted() {
         return switch (kind) {
-            case TEXT -> '"' + text + '"';
+            case TEXT -> quote(text);
             case OBJECT, LIST -> kind.words();
             default -> text;
         };

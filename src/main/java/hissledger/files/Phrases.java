@@ -58,7 +58,10 @@ public final class Phrases {
             kind = "capacitor";
             parts.add(brief(capacitor.capacitanceFarads(), "F"));
             if (capacitor.lossTangent() > 0.0) {
-                parts.add("loss tangent " + new BigDecimal(String.valueOf(capacitor.lossTangent())).toPlainString());
+                parts.add("loss tangent "
+                        + new BigDecimal(String.valueOf(capacitor.lossTangent()))
+                                .stripTrailingZeros()
+                                .toPlainString());
             }
             across(parts, capacitor.parallelOhms(), 0.0);
         } else if (source instanceof TableSource table) {

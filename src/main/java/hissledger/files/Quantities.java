@@ -1,5 +1,6 @@
 package hissledger.files;
 
+import hissledger.physics.Constants;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
@@ -60,10 +61,12 @@ public final class Quantities {
     private static final String PRINTED_PREFIXES = "fpnµm kMGT";
     private static final int LEAST_EXPONENT = -15;
     private static final int GREATEST_EXPONENT = 12;
+
+    /** Longer than any number worth writing; digits without end would take long to convert. */
+    private static final int LONGEST = 100;
+
     /** Stands for a unit that takes a prefix and is then cut off. */
     private static final String PLACEHOLDER = "x";
-
-    private static final double ZERO_CELSIUS_KELVIN = 273.15;
 
     private Quantities() {}
 
@@ -110,7 +113,12 @@ public final class Quantities {
     }
 
     private static boolean takesNoPrefix(String unit) {
-        return unit.isEmpty() || unit.startsWith("dB") || unit.equals("%") || unit.equals("K") || unit.equals("1/V");
+        return unit.isEmpty()
+                || unit.startsWith("dB")
+                || unit.equals("%")
+                || unit.equals("K")
+                || unit.equals("°C")
+                || unit.equals("1/V");
     }
 
     /** Reads a value of a dimension, in the base unit of that dimension (levels: as written, see {@link Parsed}). */
@@ -120,9 +128,12 @@ public final class Quantities {
         if (trimmed.isEmpty()) {
             throw new NotAQuantity("must not be empty; " + example);
         }
+        if (trimmed.length() > LONGEST) {
+            throw new NotAQuantity("must be " + dimension.words() + ", was " + Node.quote(text) + "; " + example);
+        }
         if (DECIMAL_COMMA.matcher(trimmed).matches()) {
-            throw new NotAQuantity("has a decimal comma in \"" + text + "\"; write a decimal point, as in \""
-                    + trimmed.replaceFirst(",", ".") + "\"");
+            throw new NotAQuantity("has a decimal comma in " + Node.quote(text) + "; write a decimal point, as in "
+                    + Node.quote(trimmed.replaceFirst(",", ".")));
         }
         if (dimension.hasLetterCode()) {
             Matcher code = LETTER_CODE.matcher(trimmed);
@@ -138,11 +149,11 @@ public final class Quantities {
         }
         Matcher matcher = NUMBER_AND_UNIT.matcher(trimmed);
         if (!matcher.matches()) {
-            throw new NotAQuantity("must be " + dimension.words() + ", was \"" + text + "\"; " + example);
+            throw new NotAQuantity("must be " + dimension.words() + ", was " + Node.quote(text) + "; " + example);
         }
         String unit = matcher.group(2);
         if (unit.isEmpty()) {
-            throw new NotAQuantity("has no unit in \"" + text + "\"; " + example);
+            throw new NotAQuantity("has no unit in " + Node.quote(text) + "; " + example);
         }
         Parsed parsed = withUnit(matcher.group(1), unit, dimension);
         if (parsed != null) {
@@ -150,11 +161,11 @@ public final class Quantities {
         }
         for (Dimension other : Dimension.values()) {
             if (withUnit(matcher.group(1), unit, other) != null) {
-                throw new NotAQuantity("must be " + dimension.words() + ", but \"" + unit + "\" in \"" + text
-                        + "\" is the unit of " + other.words() + "; " + example);
+                throw new NotAQuantity("must be " + dimension.words() + ", but " + Node.quote(unit) + " in "
+                        + Node.quote(text) + " is the unit of " + other.words() + "; " + example);
             }
         }
-        throw new NotAQuantity("has an unknown unit \"" + unit + "\" in \"" + text + "\"; " + example);
+        throw new NotAQuantity("has an unknown unit " + Node.quote(unit) + " in " + Node.quote(text) + "; " + example);
     }
 
     private static Map<String, Integer> letters(Dimension dimension) {
@@ -180,7 +191,7 @@ public final class Quantities {
             if (spelling.equals("%")) {
                 return new Parsed(scaled(number, -2), spelling);
             }
-            return new Parsed(celsius ? value + ZERO_CELSIUS_KELVIN : value, spelling);
+            return new Parsed(celsius ? value + Constants.ZERO_CELSIUS_KELVIN : value, spelling);
         }
         return null;
     }

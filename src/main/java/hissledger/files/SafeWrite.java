@@ -20,23 +20,35 @@ public final class SafeWrite {
     /** Writes bytes. */
     public static void bytes(Path target, byte[] content) throws InputException {
         String name = target.toString();
+        if (Files.isDirectory(target)) {
+            throw InputException.of(name, "cannot be written: it is a folder; name a file in it");
+        }
         Path folder = target.toAbsolutePath().getParent();
         if (folder == null || !Files.isDirectory(folder)) {
             throw InputException.of(name, "cannot be written: the folder " + folder + " does not exist; make it first");
         }
-        if (Files.isDirectory(target)) {
-            throw InputException.of(name, "cannot be written: it is a folder; name a file in it");
-        }
-        Path temporary = folder.resolve(
-                "." + target.getFileName() + "." + ProcessHandle.current().pid() + ".part");
         try {
-            Files.write(temporary, content);
-            move(temporary, target);
+            if (Files.exists(target) && !Files.isRegularFile(target)) {
+                // a device or a pipe is written to; moving a file over it would destroy it
+                Files.write(target, content);
+            } else {
+                // what a link leads to is replaced, not the link
+                replace(Files.exists(target) ? target.toRealPath() : target.toAbsolutePath(), content);
+            }
         } catch (AccessDeniedException denied) {
             throw InputException.of(
                     name, "cannot be written: no permission; choose another folder or change its permissions");
         } catch (IOException failed) {
             throw InputException.of(name, "cannot be written; check the folder, its permissions and the free space");
+        }
+    }
+
+    private static void replace(Path target, byte[] content) throws IOException {
+        Path temporary = target.resolveSibling(
+                "." + target.getFileName() + "." + ProcessHandle.current().pid() + ".part");
+        try {
+            Files.write(temporary, content);
+            move(temporary, target);
         } finally {
             try {
                 Files.deleteIfExists(temporary);

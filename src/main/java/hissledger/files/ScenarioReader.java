@@ -14,6 +14,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -29,7 +30,8 @@ public final class ScenarioReader {
     private final Faults faults;
     private final Path folder;
     private final Catalogue catalogue;
-    private final List<Fault> elsewhere = new ArrayList<>();
+    /** Faults of other files, each once however many candidates name the file. */
+    private final Set<Fault> elsewhere = new LinkedHashSet<>();
 
     private ScenarioReader(Path file, Catalogue catalogue) {
         this.faults = new Faults(file.toString());

@@ -2,11 +2,9 @@ package hissledger.files;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 
 /**
  * The keys of one kind of object. Unknown, doubled and missing keys are found here, for every object of every file.
@@ -43,12 +41,17 @@ record Shape(String words, List<Key<?>> keys) {
             byName.put(key.name(), key);
             names.add(key.name());
         }
-        Set<String> seen = new HashSet<>();
+        Map<String, Node.Member> seen = new HashMap<>();
         Map<Key<?>, Located<?>> values = new HashMap<>();
         for (Node.Member member : node.members()) {
             String path = member.value().path();
-            if (!seen.add(member.name())) {
-                faults.at(member, path, "stands twice in " + words + "; keep one");
+            Node.Member first = seen.putIfAbsent(member.name(), member);
+            if (first != null) {
+                faults.at(
+                        member,
+                        path,
+                        "stands twice in " + words + ", first at line " + first.line() + ", column " + first.column()
+                                + "; keep one");
                 continue;
             }
             Key<?> key = byName.get(member.name());
@@ -59,7 +62,7 @@ record Shape(String words, List<Key<?>> keys) {
             }
         }
         for (Key<?> key : keys) {
-            if (key.required() && !seen.contains(key.name())) {
+            if (key.required() && !seen.containsKey(key.name())) {
                 faults.at(
                         node,
                         (node.path().isEmpty() ? words + " " : "") + "has no " + key.name() + ": " + key.description());

@@ -15,6 +15,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** The source out of what was read of it. */
 final class SourceReader {
@@ -25,7 +26,7 @@ final class SourceReader {
 
     /** Names what does not go together, and reads the table where there is one. */
     static Optional<ImpedanceTable> check(
-            Fields source, Path folder, Optional<Band> band, Faults faults, List<Fault> others) {
+            Fields source, Path folder, Optional<Band> band, Faults faults, Set<Fault> others) {
         source.located(SourceKeys.REFERENCE_LEVEL).ifPresent(level -> checkLevel(source, level, faults));
         Optional<Located<String>> file = source.located(SourceKeys.FILE);
         if (file.isEmpty()) {

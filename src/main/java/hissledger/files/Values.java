@@ -24,7 +24,9 @@ final class Values {
                 faults.at(
                         node,
                         "must be " + dimension.words() + " with its unit in quotes, was the bare number " + node.text()
-                                + "; write it like \"" + node.text() + " " + first + "\"");
+                                + "; write it like \""
+                                + (finite(node) ? node.text() + " " + first : dimension.example())
+                                + "\"");
                 return Optional.empty();
             }
             if (node.kind() != Node.Kind.TEXT) {
@@ -50,7 +52,7 @@ final class Values {
             if (node.kind() != Node.Kind.NUMBER) {
                 return wrong(node, faults, "a plain number without unit and quotes");
             }
-            double value = Double.parseDouble(node.text().replace("INF", "Infinity"));
+            double value = value(node);
             if (!range.accepts(value)) {
                 faults.at(node, "must be " + range.words("") + ", was " + node.text());
                 return Optional.empty();
@@ -66,7 +68,7 @@ final class Values {
             if (node.kind() != Node.Kind.NUMBER) {
                 return wrong(node, faults, wanted);
             }
-            double value = Double.parseDouble(node.text().replace("INF", "Infinity"));
+            double value = value(node);
             if (value != Math.rint(value) || value < least || value > greatest) {
                 faults.at(node, "must be " + wanted + ", was " + node.text());
                 return Optional.empty();
@@ -172,6 +174,15 @@ final class Values {
     /** A value turned into another once it has been read. */
     static <S, T> Value<T> map(Value<S> value, Function<S, T> turn) {
         return (node, faults) -> value.read(node, faults).map(turn);
+    }
+
+    /** The number of a node; the words for what is none are read too, so that they can be refused by their names. */
+    private static double value(Node node) {
+        return Double.parseDouble(node.text().replace("INF", "Infinity"));
+    }
+
+    private static boolean finite(Node node) {
+        return Double.isFinite(value(node));
     }
 
     private static <T> Optional<T> wrong(Node node, Faults faults, String wanted) {

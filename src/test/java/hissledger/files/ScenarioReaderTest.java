@@ -173,7 +173,7 @@ class ScenarioReaderTest {
     void doubledAndMissingKeys() throws IOException {
         assertThat(faults("{ \"title\": \"a\", \"title\": \"b\", " + SOURCE + ", \"candidates\": [ " + CANDIDATE
                         + " ] }"))
-                .containsExactly("1:17: title stands twice in a scenario; keep one");
+                .containsExactly("1:17: title stands twice in a scenario, first at line 1, column 3; keep one");
         assertThat(faults("{ \"title\": \"a\", " + SOURCE + " }"))
                 .containsExactly("1:1: a scenario has no candidates: ways to build the stage, at least one");
         assertThat(faults("{ \"title\": \"a\", " + SOURCE + ", \"candidates\": [ ] }"))
@@ -190,7 +190,7 @@ class ScenarioReaderTest {
                         + " current to choose: from must be below to",
                 "\"current\": { \"optimum\": { \"from\": \"1 A\" } } | candidates[0].current leaves no current to choose:"
                         + " from is above the current rating of 2n4403, 600 mA",
-                "\"current\": \"lots\" | candidates[0].current must be a current, was \"lots\"; write it like \"1.2 mA\""
+                "\"current\": \"lots\" | candidates[0].current must be a current, like \"1.2 mA\", or \"optimum\", was \"lots\""
             })
     void currentsTheDeviceCannotCarry(String current, String sentence) throws IOException {
         assertThat(message(SOURCE, CANDIDATE.replace("\"current\": \"1 mA\"", current)))
