@@ -7,6 +7,8 @@ import hissledger.choose.Evaluation;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.circuit.CapacitorSource;
+import hissledger.circuit.Source;
+import hissledger.circuit.TableSource;
 import hissledger.device.Basis;
 import hissledger.files.Phrases;
 import hissledger.ledger.Accounting;
@@ -123,7 +125,9 @@ public final class CompareText {
                 Words.decibels(totals.noiseFigureDecibels()),
                 low.isPresent() ? Words.dbu(low.getAsDouble()) : "-",
                 strongest.name() + " (" + Words.decibels(strongest.savesDecibels()) + " dB)",
-                Words.value(evaluation.ledger().frontEnd().stage().totalAmps(), "A"));
+                evaluation.ledger().frontEnd().stage().deviceAmps().isPresent()
+                        ? Words.value(evaluation.ledger().frontEnd().stage().totalAmps(), "A")
+                        : "-");
     }
 
     private static String current(Evaluation evaluation) {
@@ -168,7 +172,8 @@ public final class CompareText {
     private static String crossover(Comparison comparison, Crossover crossover) {
         String bipolar = quoted(crossover.bipolar());
         String jfet = quoted(crossover.jfet());
-        String how = comparison.scenario().source() instanceof CapacitorSource
+        Source source = comparison.scenario().source();
+        String how = source instanceof CapacitorSource || source instanceof TableSource
                 ? "With a plain resistor as the source"
                 : "Everything else unchanged";
         if (crossover.resistanceOhms().isEmpty()) {
@@ -181,7 +186,8 @@ public final class CompareText {
                 .collect(Collectors.joining(" and "));
         String below = crossover.bipolarQuieterAtLeastResistance() ? bipolar : jfet;
         return how + ", the best bipolar candidate " + bipolar + " and the best JFET candidate " + jfet
-                + " change places at a source resistance of " + places + "; below it the quieter is " + below + ".";
+                + " change places at a source resistance of " + places + "; below "
+                + (crossover.resistanceOhms().size() == 1 ? "it" : "the first") + " the quieter is " + below + ".";
     }
 
     private static String quoted(Evaluation evaluation) {
