@@ -1,327 +1,382 @@
 package hissledger.chart;
 
+import hissledger.choose.Candidate;
 import hissledger.choose.Comparison;
 import hissledger.choose.Crossover;
 import hissledger.choose.Evaluation;
 import hissledger.choose.ResistanceSweep;
 import hissledger.choose.Scenario;
-import hissledger.circuit.CapacitorSource;
 import hissledger.circuit.CoilSource;
 import hissledger.circuit.ResistorSource;
 import hissledger.circuit.Source;
 import hissledger.files.Phrases;
+import hissledger.files.Quantities;
 import hissledger.ledger.Figure;
 import hissledger.ledger.NoiseSpectrum;
 import hissledger.physics.Decibels;
 import hissledger.physics.Weighting;
-import java.awt.BasicStroke;
-import java.awt.Color;
-import java.awt.geom.Line2D;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.jfree.chart.JFreeChart;
-import org.jfree.chart.axis.NumberAxis;
-import org.jfree.chart.axis.ValueAxis;
-import org.jfree.chart.plot.ValueMarker;
-import org.jfree.chart.plot.XYPlot;
-import org.jfree.chart.text.TextUtils;
-import org.jfree.chart.title.LegendTitle;
-import org.jfree.chart.title.TextTitle;
-import org.jfree.chart.ui.HorizontalAlignment;
-import org.jfree.chart.ui.RectangleAnchor;
-import org.jfree.chart.ui.RectangleEdge;
-import org.jfree.chart.ui.RectangleInsets;
-import org.jfree.chart.ui.TextAnchor;
-import org.jfree.data.xy.XYSeries;
-import org.jfree.data.xy.XYSeriesCollection;
+import java.util.stream.Collectors;
 
-/** The charts of a comparison. */
+/** The pictures of a comparison. */
 public final class ComparisonChart {
     private static final double NANO = 1e9;
-    private static final float TITLE = 34f;
-    private static final float SUBTITLE = 21f;
-    private static final float AXIS = 24f;
-    private static final float TICK = 22f;
-    private static final float LEGEND = 22f;
-    private static final float NOTE = 21f;
-    /** Room above and below the curves on a logarithmic axis. */
-    private static final double HEAD_ROOM = 1.25;
+    private static final int LABEL_DIGITS = 3;
+    private static final String REFERENCE = "referred to the source's EMF, source noise included";
+    private static final String FLOOR = "floor";
+    private static final String FLOOR_DETAIL = "the source alone";
 
-    private static final double LEVEL_ROOM_DECIBELS = 2.0;
+    /** Beyond the outermost values there is this much room on a logarithmic axis, as a factor. */
+    private static final double ROOM = 1.08;
 
-    /** How far around the source and the crossings a chart over resistance looks, as a ratio. */
+    /** A logarithmic axis spans at least this factor: a hair's breadth of difference should not fill the page. */
+    private static final double LEAST_SPAN = 3.0;
+
+    /** Where a logarithmic axis may end, in each decade. */
+    private static final double[] ENDS = {1.0, 1.2, 1.5, 2.0, 2.5, 3.0, 4.0, 5.0, 6.0, 8.0, 10.0};
+
+    /** A level axis ends at multiples of this, dB. */
+    private static final double LEVEL_END_DECIBELS = 5.0;
+
+    /** and at least this far from the outermost values, dB. */
+    private static final double LEVEL_ROOM_DECIBELS = 1.0;
+
+    /** How far around the source and the crossings a picture over resistance looks, as a factor. */
     private static final double AROUND = 30.0;
 
     private ComparisonChart() {}
 
-    /** EIN density of all candidates against frequency, with the source's own noise as the floor. */
+    /**
+     * EIN density of all candidates against frequency on log paper, with the source's own noise as the floor. Where the source
+     * makes no noise there is no floor.
+     */
     public static Picture density(Comparison comparison) {
-        XYSeriesCollection lines = new XYSeriesCollection();
-        double least = Double.POSITIVE_INFINITY;
-        double greatest = 0.0;
-        for (Evaluation evaluation : comparison.ranked()) {
-            NoiseSpectrum spectrum = evaluation.ledger().spectrum();
-            lines.addSeries(line(label(evaluation), spectrum.hertz(), spectrum.einVoltsPerRootHertz()));
-            for (double ein : spectrum.einVoltsPerRootHertz()) {
-                least = Math.min(least, ein);
-                greatest = Math.max(greatest, ein);
-            }
-        }
-        NoiseSpectrum first = comparison.winner().ledger().spectrum();
-        boolean floor = first.sourceVoltsPerRootHertz().stream().allMatch(density -> density > 0.0);
-        if (floor) {
-            lines.addSeries(line("floor: the source alone", first.hertz(), first.sourceVoltsPerRootHertz()));
-            for (double source : first.sourceVoltsPerRootHertz()) {
-                least = Math.min(least, source);
-            }
-        }
-        Scenario scenario = comparison.scenario();
-        DecadeAxis frequency = new DecadeAxis("frequency, Hz", 1.0);
-        frequency.setRange(scenario.band().fromHertz(), scenario.band().toHertz());
-        DecadeAxis density = new DecadeAxis("equivalent input noise density, nV/√Hz", NANO);
-        density.setRange(least / HEAD_ROOM, greatest * HEAD_ROOM);
-        XYPlot plot = plot(lines, frequency, density, first.hertz().size(), floor ? lines.getSeriesCount() - 1 : -1);
-        return picture(
-                scenario,
-                plot,
-                List.of(
-                        "Source: " + Phrases.source(scenario.source()) + ". Path and stage at "
-                                + Phrases.temperature(scenario.temperatureKelvin()) + ".",
-                        "Density " + Phrases.band(scenario.band())
-                                + ", unweighted, at the source's EMF, source noise included."));
+        return PlateDrawing.picture(densityPlate(comparison));
     }
 
     /**
-     * EIN of all candidates against source resistance, each at its own best current where that is open.
+     * EIN of all candidates under the weighting of the comparison's figure against source resistance, with the floor, the limit
+     * if the target sets one to this figure, the scenario's own source resistance and the crossings of the best bipolar and the
+     * best JFET candidate. It shows the whole decades around those places, where the decision falls, or all of the sweep where
+     * there is no such place.
      *
      * @param comparison the comparison
-     * @param sweeps one a candidate
-     * @param floorVolts noise of the source alone at the resistances of the sweeps, V rms
+     * @param sweeps the candidates to be drawn, at least one, all over the same resistances
+     * @param floorVolts noise of the source alone at those resistances, V rms
+     * @throws IllegalArgumentException if there is no sweep, or not a floor to each resistance
      */
     public static Picture resistance(Comparison comparison, List<ResistanceSweep> sweeps, List<Double> floorVolts) {
-        Figure figure = comparison.figure();
-        List<Double> ohms = sweeps.get(0).resistanceOhms();
-        double[] span = span(comparison, ohms);
-        XYSeriesCollection lines = new XYSeriesCollection();
-        Extent extent = new Extent();
-        for (ResistanceSweep sweep : sweeps) {
-            lines.addSeries(levels(sweepLabel(sweep.evaluation()), ohms, sweep.einVolts(), span, extent));
-        }
-        lines.addSeries(levels("floor: the source alone", ohms, floorVolts, span, extent));
-        DecadeAxis resistance = new DecadeAxis("source resistance, Ω", 1.0);
-        resistance.setRange(span[0], span[1]);
-        NumberAxis level = new NumberAxis("equivalent input noise over the band, " + weighting(figure) + ", dBu");
-        level.setAutoRangeIncludesZero(false);
-        level.setRange(extent.least - LEVEL_ROOM_DECIBELS, extent.greatest + LEVEL_ROOM_DECIBELS);
-        XYPlot plot = plot(lines, resistance, level, ohms.size(), lines.getSeriesCount() - 1);
+        return PlateDrawing.picture(resistancePlate(comparison, sweeps, floorVolts));
+    }
+
+    static Plate densityPlate(Comparison comparison) {
         Scenario scenario = comparison.scenario();
-        limit(comparison)
-                .ifPresent(volts -> plot.addRangeMarker(mark(
-                        Decibels.dbu(volts),
-                        "limit " + String.format(Locale.ROOT, "%.1f", Decibels.dbu(volts)) + " dBu",
-                        RectangleAnchor.TOP_LEFT,
-                        TextAnchor.BOTTOM_LEFT)));
-        OptionalDouble own = ownResistance(scenario.source());
+        List<Trace> traces = new ArrayList<>();
+        for (Evaluation evaluation : comparison.ranked()) {
+            NoiseSpectrum spectrum = evaluation.ledger().spectrum();
+            traces.add(new Trace(
+                    Trace.Role.CANDIDATE,
+                    number(scenario, evaluation.candidate()),
+                    evaluation.name(),
+                    device(evaluation) + current(evaluation),
+                    spectrum.hertz(),
+                    nano(spectrum.einVoltsPerRootHertz())));
+        }
+        NoiseSpectrum first = comparison.winner().ledger().spectrum();
+        floor(first.hertz(), nano(first.sourceVoltsPerRootHertz()), 0.0).ifPresent(traces::add);
+        return new Plate(
+                scenario.title(),
+                List.of(
+                        "Source: " + Phrases.source(scenario.source()) + ". " + surroundings(scenario),
+                        "EIN density over " + Phrases.band(scenario.band()) + ", unweighted, " + REFERENCE + "."),
+                new Scale(
+                        "frequency, Hz",
+                        Scale.Kind.LOGARITHMIC_PREFIXED,
+                        least(traces.stream().map(Trace::x).toList()),
+                        greatest(traces.stream().map(Trace::x).toList())),
+                logarithmic("equivalent input noise density, nV/√Hz", traces),
+                traces,
+                List.of());
+    }
+
+    static Plate resistancePlate(Comparison comparison, List<ResistanceSweep> sweeps, List<Double> floorVolts) {
+        if (sweeps.isEmpty()) {
+            throw new IllegalArgumentException("sweeps must not be empty");
+        }
+        Scenario scenario = comparison.scenario();
+        List<Double> ohms = sweeps.get(0).resistanceOhms();
+        if (floorVolts.size() != ohms.size()) {
+            throw new IllegalArgumentException(
+                    "floorVolts must be one to each of " + ohms.size() + " resistances, was " + floorVolts.size());
+        }
+        List<Place> places = places(comparison, sweeps);
+        Span span = Span.around(places, ohms);
+        List<Trace> traces = new ArrayList<>();
+        for (ResistanceSweep sweep : sweeps) {
+            Evaluation evaluation = sweep.evaluation();
+            traces.add(new Trace(
+                    Trace.Role.CANDIDATE,
+                    number(scenario, evaluation.candidate()),
+                    evaluation.name(),
+                    device(evaluation) + (evaluation.optimum().isPresent() ? ", best current" : current(evaluation)),
+                    span.of(sweep.resistanceOhms(), sweep.resistanceOhms()),
+                    span.of(sweep.resistanceOhms(), levels(sweep.einVolts()))));
+        }
+        floor(span.of(ohms, ohms), span.of(ohms, levels(floorVolts)), Double.NEGATIVE_INFINITY)
+                .ifPresent(traces::add);
+        limitDbu(comparison)
+                .ifPresent(dbu -> traces.add(new Trace(
+                        Trace.Role.LIMIT,
+                        0,
+                        "limit",
+                        Phrases.brief(dbu, "dBu").replace('-', '−'),
+                        List.of(span.fromOhms, span.toOhms),
+                        List.of(dbu, dbu))));
+        return new Plate(
+                scenario.title(),
+                resistanceConditions(comparison, sweeps),
+                new Scale("source resistance, Ω", Scale.Kind.LOGARITHMIC_PREFIXED, span.fromOhms, span.toOhms),
+                levelScale("equivalent input noise, " + weighting(comparison.figure()) + ", dBu", traces),
+                traces,
+                places);
+    }
+
+    private static List<String> resistanceConditions(Comparison comparison, List<ResistanceSweep> sweeps) {
+        Scenario scenario = comparison.scenario();
+        Source source = scenario.source();
+        List<String> conditions = new ArrayList<>();
+        boolean keepsItsKind = source instanceof ResistorSource || source instanceof CoilSource;
+        conditions.add("Source: "
+                + (keepsItsKind
+                        ? Phrases.source(source) + ", its resistance varied"
+                        : "a plain resistor at " + Phrases.temperature(source.temperatureKelvin()) + " in place of the "
+                                + Phrases.source(source))
+                + ". " + surroundings(scenario));
+        boolean searched =
+                sweeps.stream().anyMatch(sweep -> sweep.evaluation().optimum().isPresent());
+        conditions.add("EIN over " + Phrases.band(scenario.band()) + ", " + weighting(comparison.figure()) + ", "
+                + REFERENCE + "." + (searched ? " Best currents are found anew at each resistance." : ""));
+        comparison.crossover().map(ComparisonChart::crossing).ifPresent(conditions::add);
+        return conditions;
+    }
+
+    private static String crossing(Crossover crossover) {
+        String both = "\"" + crossover.bipolar().name() + "\" (bipolar) and \""
+                + crossover.jfet().name() + "\" (JFET)";
+        if (crossover.resistanceOhms().isEmpty()) {
+            return both + " do not change places from " + Phrases.brief(ResistanceSweep.LEAST_OHMS, "Ω") + " to "
+                    + Phrases.brief(ResistanceSweep.GREATEST_OHMS, "Ω") + ": the "
+                    + (crossover.bipolarQuieterAtLeastResistance() ? "bipolar" : "JFET") + " is quieter throughout.";
+        }
+        return both + " change places at "
+                + crossover.resistanceOhms().stream()
+                        .map(ohms -> Phrases.value(ohms, "Ω"))
+                        .collect(Collectors.joining(" and "))
+                + ".";
+    }
+
+    private static List<Place> places(Comparison comparison, List<ResistanceSweep> sweeps) {
+        List<Place> places = new ArrayList<>();
+        OptionalDouble own = ownOhms(comparison.scenario().source());
         if (own.isPresent()) {
-            plot.addDomainMarker(mark(
-                    own.getAsDouble(),
-                    "this source, " + Phrases.brief(own.getAsDouble(), "Ω"),
-                    RectangleAnchor.BOTTOM_RIGHT,
-                    TextAnchor.BOTTOM_LEFT));
+            places.add(new Place(
+                    "source " + Phrases.brief(own.getAsDouble(), "Ω"), own.getAsDouble(), OptionalDouble.empty()));
         }
         comparison
                 .crossover()
-                .map(Crossover::resistanceOhms)
-                .orElse(List.of())
-                .forEach(cross -> plot.addDomainMarker(mark(
-                        cross,
-                        "bipolar and JFET change places, " + Phrases.value(cross, "Ω"),
-                        cross < own.orElse(0.0) ? RectangleAnchor.TOP_LEFT : RectangleAnchor.TOP_RIGHT,
-                        cross < own.orElse(0.0) ? TextAnchor.TOP_RIGHT : TextAnchor.TOP_LEFT)));
-        String source = scenario.source() instanceof CapacitorSource
-                ? "Source: a plain resistor at "
-                        + Phrases.temperature(scenario.source().temperatureKelvin())
-                : "Source: " + Phrases.source(scenario.source()) + ", its resistance varied";
-        return picture(
-                scenario,
-                plot,
-                List.of(
-                        source + ". Path and stage at " + Phrases.temperature(scenario.temperatureKelvin()) + ".",
-                        "Band " + Phrases.band(scenario.band()) + ", " + weighting(figure)
-                                + ", at the source's EMF, source noise included; open currents at their best for each resistance."));
+                .ifPresent(crossover -> crossover
+                        .resistanceOhms()
+                        .forEach(ohms -> places.add(new Place(
+                                "crossover " + Phrases.value(ohms, "Ω"),
+                                ohms,
+                                levelOf(crossover.bipolar(), sweeps, ohms)))));
+        List<Double> ohms = sweeps.get(0).resistanceOhms();
+        places.removeIf(place -> !(place.x() >= ohms.get(0) && place.x() <= ohms.get(ohms.size() - 1)));
+        return places;
     }
 
-    /** Least and greatest level drawn. */
-    private static final class Extent {
-        private double least = Double.POSITIVE_INFINITY;
-        private double greatest = Double.NEGATIVE_INFINITY;
+    /** The resistances that a picture shows. */
+    private record Span(double fromOhms, double toOhms) {
+        /** Rounding of a resistance that is equal to an end. */
+        private static final double EDGE = 1.0 + 1e-9;
+
+        /** A line needs two. */
+        private static final int FEWEST_POINTS = 2;
+
+        /** The whole decades around all places as far as a sweep goes, or all of it. */
+        static Span around(List<Place> places, List<Double> sweptOhms) {
+            Span all = new Span(sweptOhms.get(0), sweptOhms.get(sweptOhms.size() - 1));
+            Span near = new Span(
+                    Math.max(all.fromOhms, decadesAround(places, -1)), Math.min(all.toOhms, decadesAround(places, +1)));
+            List<Double> shown = near.of(sweptOhms, sweptOhms);
+            return shown.size() < FEWEST_POINTS ? all : new Span(shown.get(0), shown.get(shown.size() - 1));
+        }
+
+        /** One end of the decades around all places, Ω; without any place, infinitely far. */
+        private static double decadesAround(List<Place> places, int direction) {
+            double end = places.stream()
+                    .mapToDouble(place -> direction * Math.log10(place.x()))
+                    .max()
+                    .orElse(Double.POSITIVE_INFINITY);
+            return Math.pow(10.0, direction * Math.ceil(end + Math.log10(AROUND)));
+        }
+
+        /** Those values whose resistance lies in the span. */
+        List<Double> of(List<Double> ohms, List<Double> values) {
+            List<Double> kept = new ArrayList<>();
+            for (int k = 0; k < ohms.size(); k++) {
+                if (ohms.get(k) > fromOhms / EDGE && ohms.get(k) < toOhms * EDGE) {
+                    kept.add(values.get(k));
+                }
+            }
+            return kept;
+        }
     }
 
-    private static XYSeries levels(String label, List<Double> ohms, List<Double> volts, double[] span, Extent extent) {
-        XYSeries series = new XYSeries(label, false);
-        for (int k = 0; k < ohms.size(); k++) {
-            double level = Decibels.dbu(volts.get(k));
-            series.add((double) ohms.get(k), level);
-            if (ohms.get(k) >= span[0] && ohms.get(k) <= span[1]) {
-                extent.least = Math.min(extent.least, level);
-                extent.greatest = Math.max(extent.greatest, level);
+    /** The height of a candidate's line at a resistance, on the straight line between its points, dBu. */
+    private static OptionalDouble levelOf(Evaluation evaluation, List<ResistanceSweep> sweeps, double ohms) {
+        for (ResistanceSweep sweep : sweeps) {
+            if (!sweep.evaluation().name().equals(evaluation.name())) {
+                continue;
+            }
+            for (int k = 1; k < sweep.resistanceOhms().size(); k++) {
+                double before = sweep.resistanceOhms().get(k - 1);
+                double after = sweep.resistanceOhms().get(k);
+                if (ohms >= before && ohms <= after) {
+                    double part = Math.log(ohms / before) / Math.log(after / before);
+                    double level = Decibels.dbu(sweep.einVolts().get(k - 1));
+                    return OptionalDouble.of(
+                            level + part * (Decibels.dbu(sweep.einVolts().get(k)) - level));
+                }
             }
         }
-        return series;
+        return OptionalDouble.empty();
     }
 
-    /** The resistances worth looking at: two decades below and above the source and the crossings, whole decades. */
-    private static double[] span(Comparison comparison, List<Double> ohms) {
-        double first = ohms.get(0);
-        double last = ohms.get(ohms.size() - 1);
-        List<Double> points = new ArrayList<>(
-                comparison.crossover().map(Crossover::resistanceOhms).orElse(List.of()));
-        ownResistance(comparison.scenario().source()).ifPresent(points::add);
-        if (points.isEmpty()) {
-            return new double[] {first, last};
+    private static OptionalDouble ownOhms(Source source) {
+        if (source instanceof ResistorSource resistor) {
+            return OptionalDouble.of(resistor.resistanceOhms());
         }
-        double least = points.stream().mapToDouble(Double::doubleValue).min().orElse(first);
-        double greatest = points.stream().mapToDouble(Double::doubleValue).max().orElse(last);
-        return new double[] {
-            Math.max(first, Math.pow(10.0, Math.floor(Math.log10(least / AROUND)))),
-            Math.min(last, Math.pow(10.0, Math.ceil(Math.log10(greatest * AROUND))))
-        };
+        return source instanceof CoilSource coil ? OptionalDouble.of(coil.resistanceOhms()) : OptionalDouble.empty();
     }
 
-    private static String weighting(Figure figure) {
-        return figure.weighting() == Weighting.FLAT
-                ? "unweighted"
-                : figure.weighting().label() + (figure.weighting() == Weighting.A ? "-weighted" : "");
-    }
-
-    private static Optional<Double> limit(Comparison comparison) {
-        return comparison.figure().isEin()
-                ? Optional.ofNullable(comparison.scenario().target().limits().get(comparison.figure()))
+    private static Optional<Double> limitDbu(Comparison comparison) {
+        Figure figure = comparison.figure();
+        return figure.isEin()
+                ? Optional.ofNullable(comparison.scenario().target().limits().get(figure))
+                        .map(Decibels::dbu)
                 : Optional.empty();
     }
 
-    private static OptionalDouble ownResistance(Source source) {
-        if (source instanceof ResistorSource resistor) {
-            return inRange(resistor.resistanceOhms());
-        }
-        return source instanceof CoilSource coil ? inRange(coil.resistanceOhms()) : OptionalDouble.empty();
-    }
-
-    private static OptionalDouble inRange(double ohms) {
-        return ohms >= ResistanceSweep.LEAST_OHMS && ohms <= ResistanceSweep.GREATEST_OHMS
-                ? OptionalDouble.of(ohms)
-                : OptionalDouble.empty();
-    }
-
-    private static String label(Evaluation evaluation) {
-        String current = evaluation.ledger().frontEnd().stage().deviceAmps().isPresent()
-                ? ", " + current(evaluation) + (count(evaluation) > 1 ? " each" : "")
-                : "";
-        return named(evaluation) + current;
-    }
-
-    private static String current(Evaluation evaluation) {
-        return evaluation.optimum().isPresent()
-                ? Phrases.value(evaluation.amps(), "A")
-                : Phrases.brief(evaluation.amps(), "A");
-    }
-
-    private static String sweepLabel(Evaluation evaluation) {
-        return evaluation.optimum().isPresent() ? named(evaluation) + ", best current" : label(evaluation);
-    }
-
-    private static String named(Evaluation evaluation) {
-        String id = evaluation.candidate().device().id();
-        return evaluation.name() + ": " + (count(evaluation) > 1 ? count(evaluation) + " x " + id : id);
-    }
-
-    private static int count(Evaluation evaluation) {
-        return evaluation.candidate().plan().inParallel();
-    }
-
-    private static XYSeries line(String label, List<Double> x, List<Double> y) {
-        XYSeries series = new XYSeries(label, false);
+    /** The floor, as far as it is above {@code nothing}. */
+    private static Optional<Trace> floor(List<Double> x, List<Double> y, double nothing) {
+        List<Double> placesAbove = new ArrayList<>();
+        List<Double> above = new ArrayList<>();
         for (int k = 0; k < x.size(); k++) {
-            series.add((double) x.get(k), (double) y.get(k));
+            if (y.get(k) > nothing) {
+                placesAbove.add(x.get(k));
+                above.add(y.get(k));
+            }
         }
-        return series;
+        return above.isEmpty()
+                ? Optional.empty()
+                : Optional.of(new Trace(Trace.Role.FLOOR, 0, FLOOR, FLOOR_DETAIL, placesAbove, above));
     }
 
-    private static ValueMarker mark(double value, String label, RectangleAnchor anchor, TextAnchor text) {
-        ValueMarker marker = new ValueMarker(value, Look.MARK, new BasicStroke(2.2f));
-        marker.setLabel(label);
-        marker.setLabelFont(Look.font(NOTE, false));
-        marker.setLabelPaint(Look.MARK);
-        marker.setLabelBackgroundColor(new Color(0, 0, 0, 0));
-        marker.setLabelAnchor(anchor);
-        marker.setLabelTextAnchor(text);
-        marker.setLabelOffset(new RectangleInsets(6.0, 8.0, 6.0, 8.0));
-        return marker;
+    /** Which candidate of the scenario it is: its line looks the same however the candidates are ranked. */
+    private static int number(Scenario scenario, Candidate candidate) {
+        List<String> names = scenario.candidates().stream().map(Candidate::name).toList();
+        return Math.max(0, names.indexOf(candidate.name()));
     }
 
-    private static XYPlot plot(XYSeriesCollection lines, ValueAxis x, ValueAxis y, int points, int floor) {
-        SparseMarkers renderer = new SparseMarkers(points, floor);
-        renderer.setDrawSeriesLineAsPath(true);
-        renderer.setUseOutlinePaint(true);
-        for (int series = 0; series < lines.getSeriesCount(); series++) {
-            boolean reference = series == floor;
-            renderer.setSeriesPaint(series, reference ? Look.FLOOR : Look.colour(series));
-            renderer.setSeriesOutlinePaint(series, Color.WHITE);
-            renderer.setSeriesStroke(series, reference ? Look.floorStroke() : Look.stroke(series));
-            renderer.setSeriesShape(series, Look.marker(series));
-        }
-        renderer.setLegendLine(new Line2D.Double(-32.0, 0.0, 32.0, 0.0));
-        XYPlot plot = new XYPlot(lines, x, y, renderer);
-        for (ValueAxis axis : List.of(x, y)) {
-            axis.setLabelFont(Look.font(AXIS, false));
-            axis.setTickLabelFont(Look.font(TICK, false));
-            axis.setLabelPaint(Look.INK);
-            axis.setTickLabelPaint(Look.INK);
-            axis.setAxisLinePaint(Look.INK);
-        }
-        plot.setBackgroundPaint(Color.WHITE);
-        plot.setOutlinePaint(Look.INK);
-        plot.setDomainGridlinePaint(Look.GRID);
-        plot.setRangeGridlinePaint(Look.GRID);
-        plot.setDomainGridlineStroke(new BasicStroke(1.2f));
-        plot.setRangeGridlineStroke(new BasicStroke(1.2f));
-        plot.setDomainMinorGridlinesVisible(true);
-        plot.setRangeMinorGridlinesVisible(y instanceof DecadeAxis);
-        plot.setDomainMinorGridlinePaint(Look.FINE_GRID);
-        plot.setRangeMinorGridlinePaint(Look.FINE_GRID);
-        plot.setDomainMinorGridlineStroke(new BasicStroke(1f));
-        plot.setRangeMinorGridlineStroke(new BasicStroke(1f));
-        plot.setInsets(new RectangleInsets(10.0, 12.0, 4.0, 46.0));
-        return plot;
+    /** Device and how many of them there are in all, "bf862 x2". */
+    private static String device(Evaluation evaluation) {
+        int devices = devices(evaluation);
+        String id = evaluation.candidate().device().id();
+        return devices == 1 ? id : id + " x" + devices;
     }
 
-    private static Picture picture(Scenario scenario, XYPlot plot, List<String> conditions) {
-        TextUtils.setUseDrawRotatedStringWorkaround(false);
-        JFreeChart chart = new JFreeChart(null, Look.font(TITLE, true), plot, false);
-        chart.setBackgroundPaint(Color.WHITE);
-        chart.setPadding(new RectangleInsets(18.0, 18.0, 14.0, 10.0));
-        List<TextTitle> titles = new ArrayList<>();
-        titles.add(new TextTitle(scenario.title(), Look.font(TITLE, true)));
-        conditions.forEach(condition -> titles.add(new TextTitle(condition, Look.font(SUBTITLE, false))));
-        for (TextTitle title : titles) {
-            title.setHorizontalAlignment(HorizontalAlignment.LEFT);
-            title.setTextAlignment(HorizontalAlignment.LEFT);
-            title.setPaint(Look.INK);
-            title.setPadding(new RectangleInsets(2.0, 14.0, 2.0, 10.0));
-            title.setExpandToFitSpace(true);
-            chart.addSubtitle(title);
+    private static int devices(Evaluation evaluation) {
+        int perSide = evaluation.candidate().plan().inParallel();
+        return evaluation.candidate().plan().arrangement().isPair() ? 2 * perSide : perSide;
+    }
+
+    /** ", 5 mA each"; nothing for an amplifier, which has no current of the user's. */
+    private static String current(Evaluation evaluation) {
+        if (evaluation.ledger().frontEnd().stage().deviceAmps().isEmpty()) {
+            return "";
         }
-        LegendTitle legend = new LegendTitle(plot);
-        legend.setItemFont(Look.font(LEGEND, false));
-        legend.setItemPaint(Look.INK);
-        legend.setPosition(RectangleEdge.BOTTOM);
-        legend.setBackgroundPaint(Color.WHITE);
-        legend.setItemLabelPadding(new RectangleInsets(4.0, 10.0, 4.0, 28.0));
-        legend.setLegendItemGraphicPadding(new RectangleInsets(4.0, 12.0, 4.0, 2.0));
-        chart.addSubtitle(legend);
-        return new Picture(chart);
+        return ", " + Quantities.brief(evaluation.amps(), "A", LABEL_DIGITS) + (devices(evaluation) > 1 ? " each" : "");
+    }
+
+    private static String surroundings(Scenario scenario) {
+        return "Path and stage at " + Phrases.temperature(scenario.temperatureKelvin()) + ".";
+    }
+
+    private static String weighting(Figure figure) {
+        Weighting weighting = figure.weighting();
+        return switch (weighting) {
+            case FLAT -> "unweighted";
+            case A -> "A-weighted";
+            case ITU_468, PLAYBACK, PLAYBACK_A -> weighting.label();
+        };
+    }
+
+    private static Scale logarithmic(String title, List<Trace> traces) {
+        double least = least(traces.stream().map(Trace::y).toList()) / ROOM;
+        double greatest = greatest(traces.stream().map(Trace::y).toList()) * ROOM;
+        double spread = Math.sqrt(Math.max(1.0, LEAST_SPAN * least / greatest));
+        return new Scale(title, Scale.Kind.LOGARITHMIC_PLAIN, endBelow(least / spread), endAbove(greatest * spread));
+    }
+
+    private static double endBelow(double value) {
+        double end = 0.0;
+        int decade = (int) Math.floor(Math.log10(value));
+        for (double digits : ENDS) {
+            double tried = Double.parseDouble(digits + "e" + decade);
+            end = tried <= value || end == 0.0 ? tried : end;
+        }
+        return end;
+    }
+
+    private static double endAbove(double value) {
+        int decade = (int) Math.floor(Math.log10(value));
+        for (double digits : ENDS) {
+            double tried = Double.parseDouble(digits + "e" + decade);
+            if (tried >= value) {
+                return tried;
+            }
+        }
+        return value;
+    }
+
+    private static Scale levelScale(String title, List<Trace> traces) {
+        double least = least(traces.stream().map(Trace::y).toList());
+        double greatest = greatest(traces.stream().map(Trace::y).toList());
+        return new Scale(
+                title,
+                Scale.Kind.LEVEL,
+                LEVEL_END_DECIBELS * Math.floor((least - LEVEL_ROOM_DECIBELS) / LEVEL_END_DECIBELS),
+                LEVEL_END_DECIBELS * Math.ceil((greatest + LEVEL_ROOM_DECIBELS) / LEVEL_END_DECIBELS));
+    }
+
+    private static double least(List<List<Double>> values) {
+        return values.stream().mapToDouble(Collections::min).min().orElseThrow();
+    }
+
+    private static double greatest(List<List<Double>> values) {
+        return values.stream().mapToDouble(Collections::max).max().orElseThrow();
+    }
+
+    private static List<Double> nano(List<Double> voltsPerRootHertz) {
+        return voltsPerRootHertz.stream().map(volts -> volts * NANO).toList();
+    }
+
+    private static List<Double> levels(List<Double> volts) {
+        return volts.stream().map(Decibels::dbu).toList();
     }
 }

@@ -5,103 +5,184 @@ import java.awt.Color;
 import java.awt.Font;
 import java.awt.FontFormatException;
 import java.awt.Shape;
-import java.awt.Stroke;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Area;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.io.IOException;
 import java.io.InputStream;
+import java.util.List;
 
 /**
- * The one look of all charts: dark on white, made for print. Series differ by dash and marker before they differ by colour, and
- * the colours step in lightness so that they differ in grey.
+ * The one look of all pictures: ink on white, ruled like an account book. A line is told by its dashes and its marker before it
+ * is told by its colour; the colours are equal steps of lightness, warm and cold in turn, so that they differ in grey and to
+ * those who do not see red or green.
  */
 final class Look {
-    private static final String REGULAR = "/com/formdev/flatlaf/fonts/roboto/Roboto-Regular.ttf";
-    private static final String BOLD = "/com/formdev/flatlaf/fonts/roboto/Roboto-Bold.ttf";
+    static final Color INK = new Color(0x1F, 0x1D, 0x1A);
+    /** Words of the second rank. */
+    static final Color PALE_INK = new Color(0x55, 0x50, 0x49);
+    /** The double rule under the heading, and the lines of limits and places. */
+    static final Color RULE = new Color(0x7A, 0x1F, 0x2B);
 
-    /** The reference line: the source's own noise. */
-    static final Color FLOOR = new Color(0x55, 0x55, 0x55);
+    static final Color GRID = new Color(0xB4, 0xAE, 0xA2);
+    static final Color FINE_GRID = new Color(0xE2, 0xDE, 0xD5);
+    /** Lies over the grid. */
+    static final Color FLOOR_SHADE = new Color(0x6B, 0x5B, 0x3E, 0x1E);
 
-    /** Limits and crossings. */
-    static final Color MARK = new Color(0x8C, 0x1C, 0x13);
+    /** CIE lightness 14, 58, 32, 46, 26, 61, 39 and 52. */
+    private static final List<Color> COLOURS = List.of(
+            new Color(0x0E2050),
+            new Color(0xCA781C),
+            new Color(0x911D2C),
+            new Color(0x007696),
+            new Color(0x0A4820),
+            new Color(0xC17CBB),
+            new Color(0x6C4B9D),
+            new Color(0x64863C));
 
-    static final Color INK = new Color(0x1E, 0x1E, 0x24);
-    static final Color GRID = new Color(0xC9, 0xCE, 0xD6);
-    static final Color FINE_GRID = new Color(0xE7, 0xEA, 0xEF);
-
-    /* dark to light; each hue is told from its neighbours by those who do not see red or green */
-    private static final Color[] COLOURS = {
-        new Color(0x14, 0x2B, 0x5E),
-        new Color(0xB0, 0x3A, 0x0E),
-        new Color(0x1B, 0x7F, 0x79),
-        new Color(0x7A, 0x3B, 0x9A),
-        new Color(0xC9, 0x8A, 0x00),
-        new Color(0x3E, 0x8E, 0xC7),
-        new Color(0x66, 0x70, 0x2B),
-        new Color(0xB5, 0x6A, 0x93)
-    };
-
+    /** Line and gap in turn, in widths of the line; ten, while there are eleven markers: 110 different pairs. */
     private static final float[][] DASHES = {
         {},
-        {14f, 6f},
-        {3f, 5f},
-        {18f, 5f, 3f, 5f},
-        {8f, 4f},
-        {22f, 4f, 6f, 4f},
-        {2f, 3f, 9f, 3f},
-        {12f, 3f, 3f, 3f, 3f, 3f}
+        {6f, 2f},
+        {2.2f, 1.6f},
+        {8f, 1.8f, 1.2f, 1.8f},
+        {1f, 1.3f},
+        {11f, 2.4f},
+        {5f, 1.5f, 1.2f, 1.5f, 1.2f, 1.5f},
+        {4f, 4f},
+        {8f, 1.6f, 2.6f, 1.6f},
+        {2.6f, 1.4f, 1f, 1.4f}
     };
 
-    private static final float LINE = 3.2f;
+    private static final float[] FLOOR_DASH = {0.8f, 2.6f};
+    private static final float[] LIMIT_DASH = {};
+    private static final float[] PLACE_DASH = {3f, 3f};
+    private static final int MARKERS = 11;
+
+    private static final float LINE = 2.9f;
+    private static final float FLOOR_LINE = 2.4f;
+    private static final float LIMIT_LINE = 2.0f;
+    private static final float PLACE_LINE = 1.4f;
     private static final double MARKER = 7.0;
+
+    private static final String FOLDER = "/com/formdev/flatlaf/fonts/roboto/";
+    private static final Font REGULAR = load("Roboto-Regular.ttf", Font.PLAIN);
+    private static final Font BOLD = load("Roboto-Bold.ttf", Font.BOLD);
 
     private Look() {}
 
-    /** The font of everything, from the program itself, so that a chart looks the same on every machine. */
-    static Font font(float size, boolean bold) {
-        try (InputStream stream = Look.class.getResourceAsStream(bold ? BOLD : REGULAR)) {
+    /** The typeface comes with the program, so that a picture looks the same on every machine. */
+    private static Font load(String file, int style) {
+        try (InputStream stream = Look.class.getResourceAsStream(FOLDER + file)) {
             if (stream != null) {
-                return Font.createFont(Font.TRUETYPE_FONT, stream).deriveFont(size);
+                return Font.createFont(Font.TRUETYPE_FONT, stream);
             }
         } catch (IOException | FontFormatException unreadable) {
-            // the font of the system is legible too
+            // lettering in the machine's own typeface is legible too
+            return new Font(Font.SANS_SERIF, style, 1);
         }
-        return new Font(Font.SANS_SERIF, bold ? Font.BOLD : Font.PLAIN, 1).deriveFont(size);
+        return new Font(Font.SANS_SERIF, style, 1);
     }
 
-    static Color colour(int series) {
-        return COLOURS[series % COLOURS.length];
+    /** The regular typeface. */
+    static Font regular(double size) {
+        return REGULAR.deriveFont((float) size);
     }
 
-    static Stroke stroke(int series) {
-        float[] dash = DASHES[series % DASHES.length];
-        return dash.length == 0
-                ? new BasicStroke(LINE, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND)
-                : new BasicStroke(LINE, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1f, dash, 0f);
+    /** The regular typeface, or one of the machine's that has every letter of a text. */
+    static Font regular(String text, double size) {
+        return withLetters(REGULAR, Font.PLAIN, text, size);
     }
 
-    /** A thin line of long dashes: the floor. */
-    static Stroke floorStroke() {
-        return new BasicStroke(2.2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1f, new float[] {2f, 4f}, 0f);
+    /** The bold typeface, or one of the machine's that has every letter of a text. */
+    static Font bold(String text, double size) {
+        return withLetters(BOLD, Font.BOLD, text, size);
     }
 
-    /** Markers: circle, square, triangle, diamond, and the same smaller and turned. */
-    static Shape marker(int series) {
-        double r = MARKER;
-        return switch (series % 8) {
-            case 0 -> new Ellipse2D.Double(-r, -r, 2 * r, 2 * r);
-            case 1 -> new Rectangle2D.Double(-r, -r, 2 * r, 2 * r);
-            case 2 -> polygon(0, -1.2 * r, 1.1 * r, 0.9 * r, -1.1 * r, 0.9 * r);
-            case 3 -> polygon(0, -1.35 * r, 1.35 * r, 0, 0, 1.35 * r, -1.35 * r, 0);
-            case 4 -> polygon(0, 1.2 * r, 1.1 * r, -0.9 * r, -1.1 * r, -0.9 * r);
-            case 5 -> new Rectangle2D.Double(-1.4 * r, -0.5 * r, 2.8 * r, r);
-            case 6 -> polygon(-1.2 * r, 0, 0.9 * r, 1.1 * r, 0.9 * r, -1.1 * r);
-            default ->
-                AffineTransform.getScaleInstance(0.6, 1.4)
-                        .createTransformedShape(new Ellipse2D.Double(-r, -r, 2 * r, 2 * r));
+    private static Font withLetters(Font font, int style, String text, double size) {
+        Font chosen = font.canDisplayUpTo(text) < 0 ? font : new Font(Font.SANS_SERIF, style, 1);
+        return chosen.deriveFont((float) size);
+    }
+
+    /** The colour of a trace. */
+    static Color colour(Trace.Role role, int number) {
+        return switch (role) {
+            case CANDIDATE -> COLOURS.get(number % COLOURS.size());
+            case FLOOR -> INK;
+            case LIMIT -> RULE;
         };
+    }
+
+    /** The line of a trace. */
+    static BasicStroke stroke(Trace.Role role, int number, double scale) {
+        return switch (role) {
+            case CANDIDATE -> stroke(LINE, DASHES[number % DASHES.length], scale);
+            case FLOOR -> stroke(FLOOR_LINE, FLOOR_DASH, scale);
+            case LIMIT -> stroke(LIMIT_LINE, LIMIT_DASH, scale);
+        };
+    }
+
+    /** The line at a marked place. */
+    static BasicStroke placeStroke(double scale) {
+        return stroke(PLACE_LINE, PLACE_DASH, scale);
+    }
+
+    /** A plain line. */
+    static BasicStroke plain(double width, double scale) {
+        return stroke((float) width, new float[0], scale);
+    }
+
+    private static BasicStroke stroke(float width, float[] dash, double scale) {
+        float scaled = (float) (width * scale);
+        if (dash.length == 0) {
+            return new BasicStroke(scaled, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND);
+        }
+        float[] lengths = new float[dash.length];
+        for (int k = 0; k < dash.length; k++) {
+            lengths[k] = dash[k] * scaled;
+        }
+        return new BasicStroke(scaled, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1f, lengths, 0f);
+    }
+
+    /** The marker of a candidate about the origin. */
+    static Shape marker(int number, double scale) {
+        Shape shape = switch (number % MARKERS) {
+            case 0 -> disc(1.0);
+            case 1 -> square(0.9);
+            case 2 -> polygon(0.0, -1.25, 1.15, 0.85, -1.15, 0.85);
+            case 3 -> polygon(0.0, -1.3, 1.3, 0.0, 0.0, 1.3, -1.3, 0.0);
+            case 4 -> without(disc(1.1), disc(0.6));
+            case 5 -> polygon(0.0, 1.25, 1.15, -0.85, -1.15, -0.85);
+            case 6 -> cross();
+            case 7 -> without(square(1.05), square(0.55));
+            case 8 -> AffineTransform.getRotateInstance(Math.PI / 4.0).createTransformedShape(cross());
+            case 9 -> polygon(-0.4, -1.4, 0.4, -1.4, 0.4, 1.4, -0.4, 1.4);
+            default -> polygon(-1.2, -1.0, 1.2, 1.0, 1.2, -1.0, -1.2, 1.0);
+        };
+        double size = MARKER * scale;
+        return AffineTransform.getScaleInstance(size, size).createTransformedShape(shape);
+    }
+
+    private static Shape disc(double radius) {
+        return new Ellipse2D.Double(-radius, -radius, 2.0 * radius, 2.0 * radius);
+    }
+
+    private static Shape square(double half) {
+        return new Rectangle2D.Double(-half, -half, 2.0 * half, 2.0 * half);
+    }
+
+    private static Shape cross() {
+        Area area = new Area(polygon(-1.35, -0.32, 1.35, -0.32, 1.35, 0.32, -1.35, 0.32));
+        area.add(new Area(polygon(-0.32, -1.35, 0.32, -1.35, 0.32, 1.35, -0.32, 1.35)));
+        return area;
+    }
+
+    private static Shape without(Shape whole, Shape hole) {
+        Area area = new Area(whole);
+        area.subtract(new Area(hole));
+        return area;
     }
 
     private static Shape polygon(double... xy) {

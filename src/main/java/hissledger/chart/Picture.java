@@ -1,80 +1,99 @@
 package hissledger.chart;
 
+import hissledger.physics.Require;
+import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
-import java.io.ByteArrayOutputStream;
-import java.io.IOException;
-import javax.imageio.IIOImage;
-import javax.imageio.ImageIO;
-import javax.imageio.ImageTypeSpecifier;
-import javax.imageio.ImageWriter;
-import javax.imageio.metadata.IIOMetadata;
-import javax.imageio.metadata.IIOMetadataNode;
-import javax.imageio.stream.ImageOutputStream;
-import org.jfree.chart.JFreeChart;
 
-/** A chart ready to be drawn. It is laid out once, 1600 units wide, and drawn to any size in the same proportions of type. */
+/**
+ * A picture that can be drawn at any size. Type and lines grow with the area and the layout follows, so that a small picture
+ * stays legible. What is drawn does not depend on the file format.
+ */
 public final class Picture {
-    private static final double LAYOUT_WIDTH = 1600.0;
-    /** Printed 8 inches wide, a chart of 1600 pixels has 200 pixels an inch. */
-    private static final double PRINTED_WIDTH_METRES = 0.2032;
+    /** Usual width, pixels. */
+    public static final int USUAL_WIDTH = 1600;
 
-    private final JFreeChart chart;
+    /** Usual height, pixels. */
+    public static final int USUAL_HEIGHT = 1000;
 
-    Picture(JFreeChart chart) {
-        this.chart = chart;
+    /** Least width that leaves room for lettering, pixels. */
+    public static final int LEAST_WIDTH = 640;
+
+    /** Least height that leaves room for lettering, pixels. */
+    public static final int LEAST_HEIGHT = 400;
+
+    /** Greatest width or height, pixels: an image of both takes 1 GB. */
+    public static final int GREATEST_PIXELS = 16_384;
+
+    /** Below this scale lettering shrinks no further: 11 pixels are still read with ease. */
+    private static final double LEAST_SCALE = 0.6;
+
+    /** Printed at its own resolution, a picture has lettering of about 7 points whatever its size. */
+    private static final double DOTS_PER_INCH_AT_USUAL_SIZE = 200.0;
+
+    /** Draws into an area whose lettering is to be scaled by a factor. */
+    @FunctionalInterface
+    interface Drawing {
+        /** Draws; the factor is 1 at the usual size. */
+        void draw(Graphics2D graphics, Rectangle2D area, double scale);
     }
 
-    /** The chart itself, for tests that look into it. */
-    JFreeChart chart() {
-        return chart;
+    private final Drawing drawing;
+
+    Picture(Drawing drawing) {
+        this.drawing = drawing;
     }
 
-    /** Draws the chart into an area. */
+    /** Draws the picture, on white, into an area. */
     public void draw(Graphics2D graphics, Rectangle2D area) {
-        Graphics2D scaled = (Graphics2D) graphics.create();
-        double scale = area.getWidth() / LAYOUT_WIDTH;
-        scaled.translate(area.getX(), area.getY());
-        scaled.scale(scale, scale);
-        scaled.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-        scaled.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
-        scaled.setRenderingHint(RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
-        chart.draw(scaled, new Rectangle2D.Double(0.0, 0.0, LAYOUT_WIDTH, area.getHeight() / scale));
-        scaled.dispose();
-    }
-
-    /** The chart as a PNG with its physical size; the same input gives the same bytes. */
-    public byte[] png(int widthPixels, int heightPixels) {
-        BufferedImage image = new BufferedImage(widthPixels, heightPixels, BufferedImage.TYPE_INT_RGB);
-        Graphics2D graphics = image.createGraphics();
-        draw(graphics, new Rectangle2D.Double(0.0, 0.0, widthPixels, heightPixels));
-        graphics.dispose();
-        ImageWriter writer = ImageIO.getImageWritersByFormatName("png").next();
-        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-        try (ImageOutputStream stream = ImageIO.createImageOutputStream(bytes)) {
-            writer.setOutput(stream);
-            writer.write(new IIOImage(image, null, physicalSize(writer, image, widthPixels)));
-        } catch (IOException impossible) {
-            throw new IllegalStateException("writing to memory failed", impossible);
+        Graphics2D own = (Graphics2D) graphics.create();
+        try {
+            own.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+            own.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
+            own.setRenderingHint(RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
+            own.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+            own.setPaint(Color.WHITE);
+            own.fill(area);
+            drawing.draw(own, area, scale(area.getWidth(), area.getHeight()));
         } finally {
-            writer.dispose();
+            own.dispose();
         }
-        return bytes.toByteArray();
     }
 
-    private static IIOMetadata physicalSize(ImageWriter writer, BufferedImage image, int widthPixels)
-            throws IOException {
-        IIOMetadata metadata = writer.getDefaultImageMetadata(ImageTypeSpecifier.createFromRenderedImage(image), null);
-        String perMetre = String.valueOf(Math.round(widthPixels / PRINTED_WIDTH_METRES));
-        IIOMetadataNode size = new IIOMetadataNode("pHYs");
-        size.setAttribute("pixelsPerUnitXAxis", perMetre);
-        size.setAttribute("pixelsPerUnitYAxis", perMetre);
-        size.setAttribute("unitSpecifier", "meter");
-        IIOMetadataNode root = new IIOMetadataNode("javax_imageio_png_1.0");
-        root.appendChild(size);
-        metadata.mergeTree("javax_imageio_png_1.0", root);
-        return metadata;
+    /** The picture as a PNG of the usual size. */
+    public byte[] png() {
+        return png(USUAL_WIDTH, USUAL_HEIGHT);
+    }
+
+    /**
+     * The picture as a PNG that states its physical size; equal pictures give equal bytes.
+     *
+     * @param width pixels; {@link #LEAST_WIDTH} to {@link #GREATEST_PIXELS}
+     * @param height pixels; {@link #LEAST_HEIGHT} to {@link #GREATEST_PIXELS}
+     * @throws IllegalArgumentException if one is outside its range
+     */
+    public byte[] png(int width, int height) {
+        atMost("width", Require.atLeast("width", width, LEAST_WIDTH));
+        atMost("height", Require.atLeast("height", height, LEAST_HEIGHT));
+        BufferedImage image = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
+        Graphics2D graphics = image.createGraphics();
+        try {
+            draw(graphics, new Rectangle2D.Double(0.0, 0.0, width, height));
+        } finally {
+            graphics.dispose();
+        }
+        return Png.encode(image, DOTS_PER_INCH_AT_USUAL_SIZE * scale(width, height));
+    }
+
+    private static double scale(double width, double height) {
+        return Math.max(LEAST_SCALE, Math.min(width / USUAL_WIDTH, height / USUAL_HEIGHT));
+    }
+
+    private static void atMost(String name, int pixels) {
+        if (pixels > GREATEST_PIXELS) {
+            throw new IllegalArgumentException(name + " must be at most " + GREATEST_PIXELS + ", was " + pixels);
+        }
     }
 }

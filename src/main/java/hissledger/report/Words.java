@@ -2,6 +2,7 @@ package hissledger.report;
 
 import hissledger.choose.Evaluation;
 import hissledger.choose.Scenario;
+import hissledger.circuit.StagePlan;
 import hissledger.files.Phrases;
 import hissledger.physics.Decibels;
 import hissledger.physics.Weighting;
@@ -50,11 +51,12 @@ final class Words {
                 "includes the source's own noise; NF refers to a source at 290 K.");
     }
 
-    /** Device and count, "2 x bf862". */
+    /** Device and how many of them in all, both sides of a pair counted: "bf862 x4". */
     static String device(Evaluation evaluation) {
-        int count = evaluation.candidate().plan().inParallel();
+        StagePlan plan = evaluation.candidate().plan();
+        int count = plan.arrangement().isPair() ? 2 * plan.inParallel() : plan.inParallel();
         String id = evaluation.candidate().device().id();
-        return count == 1 ? id : count + " x " + id;
+        return count == 1 ? id : id + " x" + count;
     }
 
     /** A sentence broken into lines, those after the first set in. */
