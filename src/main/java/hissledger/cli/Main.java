@@ -16,7 +16,7 @@ import picocli.CommandLine.Spec;
         mixinStandardHelpOptions = true,
         description = "Which input device, how many, at what current, in what circuit, and what the hiss will be.",
         synopsisSubcommandLabel = "VERB",
-        subcommands = {LedgerVerb.class, CompareVerb.class, DevicesVerb.class},
+        subcommands = {LedgerVerb.class, CompareVerb.class, DevicesVerb.class, NewVerb.class, SchemaVerb.class},
         footer = {
             "",
             "Example:",
@@ -42,7 +42,9 @@ public final class Main implements Runnable {
         commandLine.setOut(out);
         commandLine.setErr(err);
         commandLine.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
-        commandLine.setCaseInsensitiveEnumValuesAllowed(true);
+        commandLine.registerConverter(FileKind.class, word -> Arguments.word(FileKind.values(), word));
+        commandLine.registerConverter(
+                CompareVerb.ChartKind.class, word -> Arguments.word(CompareVerb.ChartKind.values(), word));
         commandLine.setParameterExceptionHandler(Faults::usage);
         commandLine.setExecutionExceptionHandler((fault, command, parsed) -> Faults.execution(fault, command));
         int code = commandLine.execute(args);

@@ -11,7 +11,6 @@ import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 
 /** The keys of a device file. */
 final class DeviceShapes {
@@ -215,10 +214,14 @@ final class DeviceShapes {
             "sourceResistance",
             Values.quantity(Dimension.RESISTANCE, Range.NOT_NEGATIVE),
             "source of a noise figure, >= 0 ohm");
+    private static final Value<Node> POINT_VALUE = Values.undecided(
+            pointValue(NoisePoint.Quantity.VOLTAGE_NOISE),
+            pointValue(NoisePoint.Quantity.CURRENT_NOISE),
+            pointValue(NoisePoint.Quantity.NOISE_FIGURE),
+            pointValue(NoisePoint.Quantity.OPTIMUM_RESISTANCE));
     static final Key<Node> POINT_TYPICAL =
-            Key.optional("typical", (node, faults) -> Optional.of(node), "typical value, in the unit of the quantity");
-    static final Key<Node> POINT_MAX =
-            Key.optional("max", (node, faults) -> Optional.of(node), "greatest value, in the unit of the quantity");
+            Key.optional("typical", POINT_VALUE, "typical value, in the unit of the quantity");
+    static final Key<Node> POINT_MAX = Key.optional("max", POINT_VALUE, "greatest value, in the unit of the quantity");
     static final Key<List<Located<Fields>>> NOISE_POINTS = Key.optional(
             "noisePoints",
             Values.list(

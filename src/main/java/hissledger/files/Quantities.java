@@ -112,12 +112,14 @@ public final class Quantities {
         return text.substring(0, text.length() - PLACEHOLDER.length()).strip();
     }
 
-    private static boolean takesNoPrefix(String unit) {
+    /** Whether a unit stands without prefix. */
+    static boolean takesNoPrefix(String unit) {
         return unit.isEmpty()
                 || unit.startsWith("dB")
                 || unit.equals("%")
                 || unit.equals("K")
                 || unit.equals("°C")
+                || unit.equals("degC")
                 || unit.equals("1/V");
     }
 
@@ -168,7 +170,8 @@ public final class Quantities {
         throw new NotAQuantity("has an unknown unit " + Node.quote(unit) + " in " + Node.quote(text) + "; " + example);
     }
 
-    private static Map<String, Integer> letters(Dimension dimension) {
+    /** The letters that stand for the decimal point in a letter code, with their powers of ten. */
+    static Map<String, Integer> letters(Dimension dimension) {
         return switch (dimension) {
             case RESISTANCE -> RESISTANCE_LETTERS;
             case CAPACITANCE -> CAPACITANCE_LETTERS;
@@ -183,7 +186,7 @@ public final class Quantities {
             }
             String prefix = unit.substring(0, unit.length() - spelling.length());
             Integer exponent = PREFIXES.get(prefix);
-            if (exponent == null || (!prefix.isEmpty() && (spelling.startsWith("d") || takesNoPrefix(spelling)))) {
+            if (exponent == null || (!prefix.isEmpty() && takesNoPrefix(spelling))) {
                 continue;
             }
             double value = scaled(number, exponent);

@@ -5,7 +5,6 @@ import hissledger.ledger.Figure;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 
 /** The keys of a scenario file. */
 final class ScenarioShapes {
@@ -192,11 +191,12 @@ final class ScenarioShapes {
         static final Key<Fields> OPTIMUM = Key.required(
                 "optimum", Values.object(Shape.of("a search for the best current", FROM, TO, FOR)), "where to search");
         static final Shape OPEN_CURRENT = Shape.of("an open current", OPTIMUM);
+        static final Value<Double> GIVEN_CURRENT = quantity(Dimension.CURRENT, Range.POSITIVE);
         static final Key<Node> CURRENT = Key.optional(
                 "current",
-                (node, faults) -> Optional.of(node),
+                Values.undecided(
+                        GIVEN_CURRENT, Values.word(List.of("optimum"), word -> word), Values.object(OPEN_CURRENT)),
                 "quiescent current of each device, > 0 A; or \"optimum\"; or { \"optimum\": { from, to, for } }");
-        static final Value<Double> GIVEN_CURRENT = quantity(Dimension.CURRENT, Range.POSITIVE);
         static final Key<Integer> IN_PARALLEL = Key.optional(
                 "inParallel",
                 Values.whole(1, MOST_IN_PARALLEL),

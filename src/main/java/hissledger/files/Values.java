@@ -18,7 +18,7 @@ final class Values {
 
     /** A physical value whose unit decides what it means: a level in dBu or V, a sensitivity per Pa or per m/s. */
     static Value<Quantities.Parsed> written(Dimension dimension, Range range) {
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.quantity(dimension, range), (node, faults) -> {
             if (node.kind() == Node.Kind.NUMBER) {
                 String first = dimension.example().substring(dimension.example().indexOf(' ') + 1);
                 faults.at(
@@ -43,12 +43,12 @@ final class Values {
                 faults.at(node, fault.why());
             }
             return Optional.empty();
-        };
+        });
     }
 
     /** A number without dimension. */
     static Value<Double> number(Range range) {
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.number(range), (node, faults) -> {
             if (node.kind() != Node.Kind.NUMBER) {
                 return wrong(node, faults, "a plain number without unit and quotes");
             }
@@ -58,12 +58,12 @@ final class Values {
                 return Optional.empty();
             }
             return Optional.of(value);
-        };
+        });
     }
 
     /** A whole number. */
     static Value<Integer> whole(int least, int greatest) {
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.whole(least, greatest), (node, faults) -> {
             String wanted = "a whole number from " + least + " to " + greatest;
             if (node.kind() != Node.Kind.NUMBER) {
                 return wrong(node, faults, wanted);
@@ -74,12 +74,12 @@ final class Values {
                 return Optional.empty();
             }
             return Optional.of((int) value);
-        };
+        });
     }
 
     /** A text that is not blank. */
     static Value<String> text() {
-        return (node, faults) -> {
+        return new Value<>(Schemas::text, (node, faults) -> {
             if (node.kind() != Node.Kind.TEXT) {
                 return wrong(node, faults, "a text in quotes");
             }
@@ -88,14 +88,16 @@ final class Values {
                 return Optional.empty();
             }
             return Optional.of(node.text());
-        };
+        });
     }
 
     /** True or false. */
     static Value<Boolean> flag() {
-        return (node, faults) -> node.kind() == Node.Kind.FLAG
-                ? Optional.of(Boolean.valueOf(node.text()))
-                : wrong(node, faults, "true or false, without quotes");
+        return new Value<>(
+                Schemas::flag,
+                (node, faults) -> node.kind() == Node.Kind.FLAG
+                        ? Optional.of(Boolean.valueOf(node.text()))
+                        : wrong(node, faults, "true or false, without quotes"));
     }
 
     /** One word out of a list. */
@@ -103,7 +105,7 @@ final class Values {
         Map<String, T> byWord = new LinkedHashMap<>();
         choices.forEach(choice -> byWord.put(label.apply(choice), choice));
         List<String> words = List.copyOf(byWord.keySet());
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.word(words), (node, faults) -> {
             if (node.kind() != Node.Kind.TEXT) {
                 return wrong(node, faults, "one of " + String.join(", ", words) + ", in quotes");
             }
@@ -115,12 +117,12 @@ final class Values {
                                 + meant(node.text(), words));
             }
             return chosen;
-        };
+        });
     }
 
     /** A list of values. */
     static <T> Value<List<Located<T>>> list(Value<T> item, int least) {
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.list(item.schema().get(), least), (node, faults) -> {
             if (node.kind() != Node.Kind.LIST) {
                 return wrong(node, faults, "a list [ ]");
             }
@@ -133,18 +135,18 @@ final class Values {
                 item.read(each, faults).ifPresent(value -> items.add(new Located<>(each, value)));
             }
             return Optional.of(items);
-        };
+        });
     }
 
     /** An object of a shape. */
     static Value<Fields> object(Shape shape) {
-        return shape::read;
+        return new Value<>(() -> Schemas.object(shape), shape::read);
     }
 
     /** An object whose shape its {@code kind} chooses. */
     static Value<Fields> kind(Map<String, Shape> shapes) {
         List<String> kinds = List.copyOf(shapes.keySet());
-        return (node, faults) -> {
+        return new Value<>(() -> Schemas.kind(shapes), (node, faults) -> {
             if (node.kind() != Node.Kind.OBJECT) {
                 return wrong(node, faults, "an object { } with a kind");
             }
@@ -163,17 +165,18 @@ final class Values {
                 return Optional.empty();
             }
             return shape.read(node, faults);
-        };
+        });
     }
 
-    /** A value that may take one form or another; {@code first} decides by the JSON kind whether it is the first. */
-    static <T> Value<T> either(Node.Kind first, Value<T> firstForm, Value<T> otherForm) {
-        return (node, faults) -> (node.kind() == first ? firstForm : otherForm).read(node, faults);
+    /** A value whose form is decided when other keys are known; it is handed on as it stands. */
+    static Value<Node> undecided(Value<?>... forms) {
+        return new Value<>(() -> Schemas.anyOf(forms), (node, faults) -> Optional.of(node));
     }
 
     /** A value turned into another once it has been read. */
     static <S, T> Value<T> map(Value<S> value, Function<S, T> turn) {
-        return (node, faults) -> value.read(node, faults).map(turn);
+        return new Value<>(
+                value.schema(), (node, faults) -> value.read(node, faults).map(turn));
     }
 
     /** The number of a node; the words for what is none are read too, so that they can be refused by their names. */
