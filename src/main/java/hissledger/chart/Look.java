@@ -109,7 +109,7 @@ final class Look {
     /** The colour of a trace. */
     static Color colour(Trace.Role role, int number) {
         return switch (role) {
-            case CANDIDATE -> COLOURS.get(number % COLOURS.size());
+            case CANDIDATE, POINTS -> COLOURS.get(number % COLOURS.size());
             case FLOOR -> INK;
             case LIMIT -> RULE;
         };
@@ -118,7 +118,7 @@ final class Look {
     /** The line of a trace. */
     static BasicStroke stroke(Trace.Role role, int number, double scale) {
         return switch (role) {
-            case CANDIDATE -> stroke(LINE, DASHES[number % DASHES.length], scale);
+            case CANDIDATE, POINTS -> stroke(LINE, DASHES[number % DASHES.length], scale);
             case FLOOR -> stroke(FLOOR_LINE, FLOOR_DASH, scale);
             case LIMIT -> stroke(LIMIT_LINE, LIMIT_DASH, scale);
         };

@@ -228,9 +228,11 @@ final class PlateDrawing {
             graphics.setPaint(colour);
             graphics.setStroke(Look.plain(HAIR, scale));
             graphics.draw(new Line2D.Double(start + 3.0 * scale, ends[k], sample - 3.0 * scale, sampleY));
-            graphics.setStroke(Look.stroke(trace.role(), trace.number(), scale));
-            graphics.draw(new Line2D.Double(sample, sampleY, sample + SAMPLE * scale, sampleY));
-            if (trace.role() == Trace.Role.CANDIDATE) {
+            if (trace.role() != Trace.Role.POINTS) {
+                graphics.setStroke(Look.stroke(trace.role(), trace.number(), scale));
+                graphics.draw(new Line2D.Double(sample, sampleY, sample + SAMPLE * scale, sampleY));
+            }
+            if (trace.role() == Trace.Role.CANDIDATE || trace.role() == Trace.Role.POINTS) {
                 Graphics2D moved = (Graphics2D) graphics.create();
                 moved.translate(sample + SAMPLE * scale, sampleY);
                 moved.fill(Look.marker(trace.number(), scale));

@@ -22,6 +22,9 @@ final class SparseMarkers extends XYLineAndShapeRenderer {
     @Override
     public boolean getItemShapeVisible(int series, int item) {
         Trace trace = traces.get(series);
+        if (trace.role() == Trace.Role.POINTS) {
+            return true;
+        }
         if (trace.role() != Trace.Role.CANDIDATE) {
             return false;
         }
@@ -33,6 +36,11 @@ final class SparseMarkers extends XYLineAndShapeRenderer {
         double turn = trace.number() * GOLDEN_SECTION;
         double part = MARGIN + (1.0 - 2.0 * MARGIN) * (turn - Math.floor(turn));
         return item % step == (int) (part * step);
+    }
+
+    @Override
+    public boolean getItemLineVisible(int series, int item) {
+        return traces.get(series).role() != Trace.Role.POINTS;
     }
 
     @Override

@@ -20,7 +20,9 @@ record Trace(Role role, int number, String name, String detail, List<Double> x, 
         /** The source's own noise. */
         FLOOR,
         /** A limit of the target. */
-        LIMIT
+        LIMIT,
+        /** Points without a line between them. */
+        POINTS
     }
 
     Trace {

@@ -7,12 +7,10 @@ import hissledger.choose.Evaluation;
 import hissledger.choose.ResistanceSweep;
 import hissledger.choose.Scenario;
 import hissledger.files.InputException;
-import hissledger.files.SafeWrite;
 import hissledger.ledger.Figure;
 import hissledger.report.CompareText;
 import hissledger.report.Csv;
 import hissledger.report.ResultTree;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -22,7 +20,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 
 /** Candidates side by side. */
@@ -52,10 +49,7 @@ final class CompareVerb implements Callable<Integer> {
         }
     }
 
-    private static final int CHART_WIDTH = 1600;
-    private static final int CHART_HEIGHT = 1000;
     private static final int SWEEP_POINTS_PER_DECADE = 6;
-    private static final String PNG = ".png";
 
     @Mixin
     private Inputs inputs = new Inputs();
@@ -70,8 +64,8 @@ final class CompareVerb implements Callable<Integer> {
     @Mixin
     private Outputs outputs = new Outputs();
 
-    @Option(names = "--chart", paramLabel = "FILE.png", description = "write the chart as PNG, 1600 x 1000 pixels")
-    private Optional<Path> chart = Optional.empty();
+    @Mixin
+    private ChartFile chart = new ChartFile();
 
     @Option(
             names = "--chart-kind",
@@ -87,15 +81,11 @@ final class CompareVerb implements Callable<Integer> {
 
     @Override
     public Integer call() throws InputException {
-        if (chart.isPresent()
-                && !chart.get().toString().toLowerCase(Locale.ROOT).endsWith(PNG)) {
-            throw new ParameterException(
-                    spec.commandLine(), "--chart writes PNG: give a file name that ends in .png, not " + chart.get());
-        }
+        chart.check(spec);
         Scenario scenario = inputs.read();
         Comparison comparison = Comparison.of(scenario, figure(scenario));
-        if (chart.isPresent()) {
-            SafeWrite.bytes(chart.get(), picture(comparison).png(CHART_WIDTH, CHART_HEIGHT));
+        if (chart.isAsked()) {
+            chart.write(picture(comparison));
         }
         outputs.write(
                 spec.commandLine().getOut(),

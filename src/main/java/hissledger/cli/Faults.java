@@ -62,13 +62,19 @@ final class Faults {
             }
             return ExitCode.INPUT;
         }
+        return internal(fault, command);
+    }
+
+    /** A mistake of the program's own. */
+    static int internal(Throwable fault, CommandLine command) {
+        PrintWriter err = command.getErr();
         err.println("hissledger: internal fault: " + fault.getClass().getSimpleName()
                 + (fault.getMessage() == null ? "" : ", " + fault.getMessage()) + place(fault)
                 + ". This is a mistake in the program: please report it with the scenario and the devices it uses.");
         return ExitCode.INTERNAL;
     }
 
-    private static String place(Exception fault) {
+    private static String place(Throwable fault) {
         StackTraceElement[] trace = fault.getStackTrace();
         return trace.length == 0 ? "" : " (" + trace[0].getFileName() + ":" + trace[0].getLineNumber() + ")";
     }

@@ -47,7 +47,12 @@ public final class Main implements Runnable {
                 CompareVerb.ChartKind.class, word -> Arguments.word(CompareVerb.ChartKind.values(), word));
         commandLine.setParameterExceptionHandler(Faults::usage);
         commandLine.setExecutionExceptionHandler((fault, command, parsed) -> Faults.execution(fault, command));
-        int code = commandLine.execute(args);
+        int code;
+        try {
+            code = commandLine.execute(args);
+        } catch (StackOverflowError | OutOfMemoryError | LinkageError fault) {
+            code = Faults.internal(fault, commandLine);
+        }
         out.flush();
         err.flush();
         return code;

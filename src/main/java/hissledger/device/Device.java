@@ -70,12 +70,24 @@ public record Device(
         return parameter(DeviceParameter.CURRENT).map(Parameter::max).orElse(OptionalDouble.empty());
     }
 
-    /** Whether any value that a noise calculation uses has the given basis. */
-    public boolean rests(Basis basis) {
-        return currentGain.filter(gain -> gain.basis() == basis).isPresent()
-                || parameters.entrySet().stream()
-                        .anyMatch(entry ->
-                                !entry.getKey().isRating() && entry.getValue().basis() == basis);
+    /** Whether the sheet states flicker noise, so that densities fall with frequency. */
+    public boolean noiseFallsWithFrequency() {
+        return parameters.containsKey(DeviceParameter.BASE_FLICKER_CORNER)
+                || parameters.containsKey(DeviceParameter.FLICKER_DENSITY);
+    }
+
+    /** The values that a noise calculation uses and that rest on the given basis, in words. */
+    public List<String> resting(Basis basis) {
+        List<String> words = new ArrayList<>();
+        if (currentGain.filter(gain -> gain.basis() == basis).isPresent()) {
+            words.add("hFE");
+        }
+        inOrder().forEach((key, parameter) -> {
+            if (!key.isRating() && parameter.basis() == basis) {
+                words.add(key.words());
+            }
+        });
+        return words;
     }
 
     /**

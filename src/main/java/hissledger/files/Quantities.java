@@ -123,6 +123,33 @@ public final class Quantities {
                 || unit.equals("1/V");
     }
 
+    /** A resistance as written on a command line, Ω; {@link IllegalArgumentException} says what is wrong. */
+    public static double ohms(String text) {
+        return orIllegal(text, Dimension.RESISTANCE);
+    }
+
+    /** A current as written on a command line, A; {@link IllegalArgumentException} says what is wrong. */
+    public static double amps(String text) {
+        return orIllegal(text, Dimension.CURRENT);
+    }
+
+    /** A transconductance as written on a command line, S; {@link IllegalArgumentException} says what is wrong. */
+    public static double siemens(String text) {
+        return orIllegal(text, Dimension.CONDUCTANCE);
+    }
+
+    private static double orIllegal(String text, Dimension dimension) {
+        try {
+            double value = parse(text, dimension).value();
+            if (!(value > 0.0) || Double.isInfinite(value)) {
+                throw new IllegalArgumentException("must be finite and > 0, was \"" + text + "\"");
+            }
+            return value;
+        } catch (NotAQuantity fault) {
+            throw new IllegalArgumentException(fault.why(), fault);
+        }
+    }
+
     /** Reads a value of a dimension, in the base unit of that dimension (levels: as written, see {@link Parsed}). */
     static Parsed parse(String text, Dimension dimension) throws NotAQuantity {
         String trimmed = text.strip();

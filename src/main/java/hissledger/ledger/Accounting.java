@@ -236,45 +236,22 @@ public final class Accounting {
             return densities;
         }
 
-        /**
-         * en² is the sum of all powers seen from the row (1, 0), in² from (0, 1), and 2z Re&lt;e i*&gt;, 2z Im&lt;e i*&gt; are
-         * what the rows (1, z) and (1, jz) see beyond en² + z² in². With z = en/in nothing is lost to rounding.
-         */
         List<Spot> spots() {
             int n = frequencies.count();
+            List<NoiseParameters> noise = NoiseParameters.of(frequencies, frontEnd::walkBehindSource);
             ChainPass voltage = new ChainPass(frequencies);
             voltage.beginWith(1.0, 0.0, 0.0);
-            double[] voltsSquared = added(voltage);
+            frontEnd.walkBehindSource(voltage);
             ChainPass current = new ChainPass(frequencies);
             current.beginWith(0.0, 1.0, 0.0);
-            double[] ampsSquared = added(current);
-            double[] z = new double[n];
-            for (int k = 0; k < n; k++) {
-                z[k] = ampsSquared[k] > 0.0 ? Math.sqrt(voltsSquared[k] / ampsSquared[k]) : 0.0;
-            }
-            ChainPass mixed = new ChainPass(frequencies);
-            mixed.beginBehind((f, re, im) -> {
-                System.arraycopy(z, 0, re, 0, n);
-                Arrays.fill(im, 0.0);
-            });
-            double[] real = added(mixed);
-            mixed.beginBehind((f, re, im) -> {
-                Arrays.fill(re, 0.0);
-                System.arraycopy(z, 0, im, 0, n);
-            });
-            double[] imaginary = added(mixed);
+            frontEnd.walkBehindSource(current);
             double[] sourceRe = new double[n];
             double[] sourceIm = new double[n];
             frontEnd.source().impedance().fill(frequencies, sourceRe, sourceIm);
 
             List<Spot> spots = new ArrayList<>();
             for (int k = 0; k < wanted; k++) {
-                double twice = 2.0 * voltsSquared[k];
-                NoiseParameters parameters = new NoiseParameters(
-                        Math.sqrt(voltsSquared[k]),
-                        Math.sqrt(ampsSquared[k]),
-                        z[k] > 0.0 ? (real[k] - twice) / twice : 0.0,
-                        z[k] > 0.0 ? (imaginary[k] - twice) / twice : 0.0);
+                NoiseParameters parameters = noise.get(k);
                 OptionalDouble noiseFigure = sourceRe[k] > 0.0
                         ? OptionalDouble.of(Decibels.ofPowerRatio(parameters.noiseFactor(sourceRe[k], sourceIm[k])))
                         : OptionalDouble.empty();
@@ -297,13 +274,6 @@ public final class Accounting {
                         (cIm * aRe - cRe * aIm) / openSquare));
             }
             return spots;
-        }
-
-        private double[] added(ChainPass pass) {
-            frontEnd.walkBehindSource(pass);
-            double[] sum = new double[frequencies.count()];
-            pass.total(sum);
-            return sum;
         }
     }
 }

@@ -226,18 +226,15 @@ public final class CompareText {
         List<String> remarks = new ArrayList<>();
         byDevice.forEach((id, evaluation) -> {
             List<String> parts = new ArrayList<>();
-            List<String> bases = new ArrayList<>();
             for (Basis basis : List.of(Basis.DERIVED, Basis.PRACTICE, Basis.MEMORY, Basis.INVENTED)) {
-                if (evaluation.candidate().device().rests(basis)) {
-                    bases.add(basis.label());
+                List<String> resting = evaluation.candidate().device().resting(basis);
+                if (!resting.isEmpty()) {
+                    parts.add(basis.label() + ": " + String.join(", ", resting));
                 }
-            }
-            if (!bases.isEmpty()) {
-                parts.add("some values are " + String.join(", ", bases));
             }
             parts.addAll(grouped(evaluation.design().defaultsUsed()));
             if (!parts.isEmpty()) {
-                remarks.addAll(Words.wrapped("On " + id + ": " + String.join(". ", parts) + "."));
+                remarks.addAll(Words.wrapped("On " + id + ": " + String.join("; ", parts) + "."));
             }
         });
         return remarks;
@@ -252,7 +249,7 @@ public final class CompareText {
                     .add(line.substring(0, colon));
         }
         List<String> groups = new ArrayList<>();
-        byRule.forEach((rule, names) -> groups.add(String.join(", ", names) + ": " + rule));
+        byRule.forEach((rule, names) -> groups.add(String.join(", ", names) + " " + rule));
         return groups;
     }
 }

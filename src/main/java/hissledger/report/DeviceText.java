@@ -9,10 +9,14 @@ import hissledger.device.NoisePoint;
 import hissledger.device.Parameter;
 import hissledger.device.StatedAt;
 import hissledger.files.Phrases;
+import hissledger.ledger.DeviceCurves;
+import hissledger.ledger.SheetCheck;
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Devices as text. */
@@ -50,38 +54,130 @@ public final class DeviceText {
 
     private DeviceText() {}
 
-    /** One line a device. */
-    public static String list(List<Device> devices) {
+    /**
+     * One line a device, with its typical gain or transconductance and noise at a current.
+     *
+     * @param devices the devices
+     * @param amps the collector or drain current, A
+     */
+    public static String list(List<Device> devices, double amps) {
         TextTable table = new TextTable()
                 .column(TextTable.Align.LEFT, "id")
                 .column(TextTable.Align.LEFT, "kind")
                 .column(TextTable.Align.LEFT, "polarity")
                 .column(TextTable.Align.LEFT, "evidence")
+                .column(TextTable.Align.POINT, "hFE or gm", "at " + Phrases.brief(amps, "A"))
+                .column(TextTable.Align.POINT, "rbb'", "typical")
+                .column(TextTable.Align.POINT, "en at 1 kHz", "per √Hz")
+                .column(TextTable.Align.POINT, "in at 1 kHz", "per √Hz")
                 .column(TextTable.Align.LEFT, "description");
         for (Device device : devices) {
+            Optional<DeviceCurves.Point> point = DeviceCurves.at(device, amps, DeviceCurves.USUAL_HERTZ);
             table.row(
                     device.id(),
                     device.kind().label(),
                     device.polarity().label(),
                     device.evidence(),
+                    point.map(each -> gain(device, each)).orElse(""),
+                    device.parameter(DeviceParameter.BASE_RESISTANCE)
+                            .map(ohms -> Words.value(ohms.representative(), "Ω"))
+                            .orElse(""),
+                    point.map(each -> Words.value(each.noise().voltsPerRootHertz(), "V"))
+                            .orElse(""),
+                    point.map(each -> Words.value(each.noise().ampsPerRootHertz(), "A"))
+                            .orElse(""),
                     device.description());
         }
-        return table.render();
+        return table.render() + devices.size() + (devices.size() == 1 ? " device" : " devices")
+                + "; typical values at 25 °C, input shorted for en, open for in.\n";
     }
 
-    /** What a check found of files that have no fault. */
+    private static String gain(Device device, DeviceCurves.Point point) {
+        return device.kind() == DeviceKind.JFET
+                ? Words.value(point.gain(), "S")
+                : String.format(Locale.ROOT, "%.0f", point.gain());
+    }
+
+    /** What a check found of files that have no fault: each published noise point held against the model. */
     public static String checked(List<Device> devices) {
-        StringBuilder text = new StringBuilder();
+        TextTable table = new TextTable()
+                .column(TextTable.Align.LEFT, "device")
+                .column(TextTable.Align.LEFT, "quantity", "at 25 °C")
+                .column(TextTable.Align.POINT, "current")
+                .column(TextTable.Align.POINT, "frequency")
+                .column(TextTable.Align.POINT, "source")
+                .column(TextTable.Align.POINT, "model", "typical")
+                .column(TextTable.Align.POINT, "model", "least")
+                .column(TextTable.Align.POINT, "model", "greatest")
+                .column(TextTable.Align.POINT, "published", "typical")
+                .column(TextTable.Align.POINT, "published", "limit")
+                .column(TextTable.Align.POINT, "published", "over model, dB")
+                .column(TextTable.Align.LEFT, "verdict");
+        Map<SheetCheck.Verdict, Integer> counts = new EnumMap<>(SheetCheck.Verdict.class);
+        int points = 0;
         for (Device device : devices) {
-            int defaults = resolvedDefaults(device).size();
-            text.append(device.id()).append(": no fault; ");
-            text.append(defaults == 0 ? "complete" : defaults + " default" + (defaults == 1 ? "" : "s") + " in use");
-            text.append('\n');
+            for (SheetCheck check : SheetCheck.of(device)) {
+                counts.merge(check.verdict(), 1, Integer::sum);
+                points++;
+                checkRow(table, device, check);
+            }
+        }
+        StringBuilder text = new StringBuilder();
+        if (points > 0) {
+            text.append(table.render()).append('\n');
         }
         text.append(devices.size())
                 .append(devices.size() == 1 ? " device" : " devices")
-                .append(" read.\n");
+                .append(" read, no fault. Published noise points: ")
+                .append(points);
+        counts.forEach((verdict, count) ->
+                text.append("; ").append(verdict.words()).append(' ').append(count));
+        text.append(".\n");
+        if (points > 0) {
+            Words.wrapped(
+                            "Where a sheet derives rbb' or the channel noise factor from one of these points, agreement with"
+                                    + " that point shows that the derivation is sound, not that the model is confirmed (see devices"
+                                    + " show ID).")
+                    .forEach(line -> text.append(line).append('\n'));
+        }
         return text.toString();
+    }
+
+    private static void checkRow(TextTable table, Device device, SheetCheck check) {
+        NoisePoint point = check.point();
+        String unit = unit(point.quantity());
+        boolean compared = check.model().isPresent();
+        OptionalDouble difference = check.differenceDecibels();
+        table.row(
+                device.id(),
+                point.quantity().key(),
+                point.currentAmps().isPresent()
+                        ? Phrases.brief(point.currentAmps().getAsDouble(), "A")
+                        : "",
+                Phrases.brief(point.hertz(), "Hz"),
+                point.sourceOhms().isPresent()
+                        ? Phrases.brief(point.sourceOhms().getAsDouble(), "Ω")
+                        : "",
+                compared ? figure(check.model().getAsDouble(), unit) : "",
+                compared ? figure(check.least(), unit) : "",
+                compared ? figure(check.greatest(), unit) : "",
+                point.typical().isPresent() ? figure(point.typical().getAsDouble(), unit) : "",
+                point.max().isPresent() ? figure(point.max().getAsDouble(), unit) : "",
+                difference.isPresent() ? String.format(Locale.ROOT, "%+.2f", difference.getAsDouble()) : "",
+                check.verdict().words() + (check.reason().isEmpty() ? "" : ": " + check.reason()));
+    }
+
+    private static String figure(double value, String unit) {
+        return unit.equals("dB") ? String.format(Locale.ROOT, "%.2f dB", value) : Words.value(value, unit);
+    }
+
+    private static String unit(NoisePoint.Quantity quantity) {
+        return switch (quantity) {
+            case VOLTAGE_NOISE -> "V/√Hz";
+            case CURRENT_NOISE -> "A/√Hz";
+            case NOISE_FIGURE -> "dB";
+            case OPTIMUM_RESISTANCE -> "Ω";
+        };
     }
 
     /** Every value with its basis and reference. */
@@ -116,6 +212,10 @@ public final class DeviceText {
                         .append('\n');
             }
         }
+        if (device.kind() != DeviceKind.AMPLIFIER) {
+            text.append("\nTypical values against current at 25 °C:\n");
+            text.append(curves(device).render());
+        }
         List<String> defaults = resolvedDefaults(device);
         if (!defaults.isEmpty()) {
             text.append("\nDefaults in use:\n");
@@ -148,6 +248,27 @@ public final class DeviceText {
         return table;
     }
 
+    private static TextTable curves(Device device) {
+        TextTable table = new TextTable()
+                .column(TextTable.Align.POINT, device.kind() == DeviceKind.JFET ? "ID" : "IC")
+                .column(TextTable.Align.POINT, device.kind() == DeviceKind.JFET ? "gm" : "hFE")
+                .column(TextTable.Align.POINT, "en at 1 kHz", "per √Hz")
+                .column(TextTable.Align.POINT, "in at 1 kHz", "per √Hz")
+                .column(TextTable.Align.POINT, "best source", "resistance")
+                .column(TextTable.Align.POINT, "least NF", "dB");
+        for (DeviceCurves.Point point :
+                DeviceCurves.of(device, DeviceCurves.USUAL_HERTZ).points()) {
+            table.row(
+                    Phrases.brief(point.amps(), "A"),
+                    gain(device, point),
+                    Words.value(point.noise().voltsPerRootHertz(), "V"),
+                    Words.value(point.noise().ampsPerRootHertz(), "A"),
+                    Words.value(point.noise().optimumResistanceOhms(), "Ω"),
+                    Words.decibels(point.noise().minimumNoiseFigureDecibels()));
+        }
+        return table;
+    }
+
     private static void gain(TextTable table, GainSheet gain, List<String> references) {
         for (GainPoint point : gain.points()) {
             table.row(
@@ -173,12 +294,7 @@ public final class DeviceText {
                 .column(TextTable.Align.LEFT, "basis")
                 .column(TextTable.Align.LEFT, "reference");
         for (NoisePoint point : device.noisePoints()) {
-            String unit = switch (point.quantity()) {
-                case VOLTAGE_NOISE -> "V/√Hz";
-                case CURRENT_NOISE -> "A/√Hz";
-                case NOISE_FIGURE -> "dB";
-                case OPTIMUM_RESISTANCE -> "Ω";
-            };
+            String unit = unit(point.quantity());
             table.row(
                     point.quantity().key(),
                     cell(point.typical(), unit),

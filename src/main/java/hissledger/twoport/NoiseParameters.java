@@ -4,6 +4,10 @@ import hissledger.physics.Constants;
 import hissledger.physics.Decibels;
 import hissledger.physics.Require;
 import hissledger.physics.Thermal;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.function.Consumer;
 
 /**
  * The noise of a linear two-port at one frequency: equivalent voltage, equivalent current and their correlation, with
@@ -24,6 +28,56 @@ public record NoiseParameters(
         Require.notNegative("ampsPerRootHertz", ampsPerRootHertz, "A/√Hz");
         Require.finite("correlationRe", correlationRe, "");
         Require.finite("correlationIm", correlationIm, "");
+    }
+
+    /**
+     * The parameters of a two-port at some frequencies, by walking it from four rows.
+     *
+     * <p>en² is the sum of all powers seen from the row (1, 0), in² from (0, 1), and 2z Re&lt;e i*&gt;, 2z Im&lt;e i*&gt; are what
+     * the rows (1, z) and (1, jz) see beyond en² + z² in². With z = en/in nothing is lost to rounding.
+     *
+     * @param frequencies where
+     * @param twoPort leads a walk, which stands at the two-port's input, through it
+     * @return one set a frequency
+     */
+    public static List<NoiseParameters> of(Frequencies frequencies, Consumer<ChainPass> twoPort) {
+        int n = frequencies.count();
+        ChainPass pass = new ChainPass(frequencies);
+        pass.beginWith(1.0, 0.0, 0.0);
+        double[] voltsSquared = added(pass, twoPort);
+        pass.beginWith(0.0, 1.0, 0.0);
+        double[] ampsSquared = added(pass, twoPort);
+        double[] z = new double[n];
+        for (int k = 0; k < n; k++) {
+            z[k] = ampsSquared[k] > 0.0 ? Math.sqrt(voltsSquared[k] / ampsSquared[k]) : 0.0;
+        }
+        pass.beginBehind((f, re, im) -> {
+            System.arraycopy(z, 0, re, 0, n);
+            Arrays.fill(im, 0.0);
+        });
+        double[] real = added(pass, twoPort);
+        pass.beginBehind((f, re, im) -> {
+            Arrays.fill(re, 0.0);
+            System.arraycopy(z, 0, im, 0, n);
+        });
+        double[] imaginary = added(pass, twoPort);
+        List<NoiseParameters> parameters = new ArrayList<>();
+        for (int k = 0; k < n; k++) {
+            double twice = 2.0 * voltsSquared[k];
+            parameters.add(new NoiseParameters(
+                    Math.sqrt(voltsSquared[k]),
+                    Math.sqrt(ampsSquared[k]),
+                    z[k] > 0.0 ? (real[k] - twice) / twice : 0.0,
+                    z[k] > 0.0 ? (imaginary[k] - twice) / twice : 0.0));
+        }
+        return parameters;
+    }
+
+    private static double[] added(ChainPass pass, Consumer<ChainPass> twoPort) {
+        twoPort.accept(pass);
+        double[] sum = new double[pass.frequencies().count()];
+        pass.total(sum);
+        return sum;
     }
 
     private static double fourKt0() {

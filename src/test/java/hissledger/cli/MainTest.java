@@ -115,11 +115,58 @@ class MainTest {
                 .contains("base spreading resistance", "derived", "References:", "Defaults in use:");
         Outcome check = run("devices", "check");
         assertThat(check.exit()).isZero();
-        assertThat(check.out()).contains("devices read.");
+        assertThat(check.out()).contains("devices read, no fault.");
+    }
+
+    @Test
+    void devicesListNarrowsByKindPolarityAndValues() {
+        String out = run("devices", "list", "--kind", "bipolar", "--polarity", "pnp", "--rbb-below", "5 ohm")
+                .out();
+        assertThat(out).contains("ztx951", "typical values at 25 °C").doesNotContain("bc327-40", "2n4401", "bf862");
+        assertThat(run("devices", "list", "--at", "2 mA", "--gm-above", "10 mS").out())
+                .contains("bf862", "lsk170")
+                .doesNotContain("2n4117a", "2n4403");
+        assertThat(run("devices", "list", "--hfe-above", "700").out())
+                .contains("mpsa18")
+                .doesNotContain("2n4403");
+        Outcome wrong = run("devices", "list", "--rbb-below", "30");
+        assertThat(wrong.exit()).isEqualTo(2);
+        assertThat(wrong.err()).startsWith("hissledger: --rbb-below has no unit in \"30\"; write it like \"150 ohm\"");
+    }
+
+    @Test
+    void newWritesAStarterOnceAndSchemaDescribesIt() throws java.io.IOException {
+        Path scenario = folder.resolve("mine.json");
+        assertThat(run("new", "scenario", scenario.toString()).out())
+                .isEqualToNormalizingNewlines("Wrote " + scenario + ". Try it: hissledger compare " + scenario + "\n");
+        assertThat(run("compare", scenario.toString()).exit()).isZero();
+        Outcome again = run("new", "scenario", scenario.toString());
+        assertThat(again.exit()).isEqualTo(2);
+        assertThat(again.err())
+                .isEqualToNormalizingNewlines(
+                        scenario + ": exists already and is left as it is; choose another name\n");
+        Path device = folder.resolve("mine-too.json");
+        assertThat(run("new", "device", device.toString()).exit()).isZero();
+        assertThat(run("devices", "check", device.toString()).out()).contains("1 device read, no fault.");
+        assertThat(run("new", "device", folder.resolve("mine.txt").toString()).err())
+                .contains("must end in .json, since the name before it becomes the id of the device");
+        assertThat(run("schema", "device").out()).startsWith("{").contains("2020-12/schema", "baseResistance");
+        assertThat(run("schema", "circuit").err()).contains("must be scenario or device, was 'circuit'");
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"ledger", "compare", "devices", "devices list", "devices show", "devices check", ""})
+    @ValueSource(
+            strings = {
+                "ledger",
+                "compare",
+                "devices",
+                "devices list",
+                "devices show",
+                "devices check",
+                "new",
+                "schema",
+                ""
+            })
     void everyVerbHasHelpWithAnExample(String verb) {
         String[] args = (verb.isEmpty() ? "--help" : verb + " --help").split(" ");
         Outcome outcome = run(args);

@@ -391,10 +391,10 @@ class SheetTest {
                         DeviceParameter.BASE_RESISTANCE,
                         Parameter.typical(20.0, Basis.MEMORY)));
         assertThat(device.ratedAmps()).hasValue(0.1);
-        assertThat(device.rests(Basis.MEMORY)).isTrue();
+        assertThat(device.resting(Basis.MEMORY)).isNotEmpty();
         // only the rating is invented, and no noise rests on a rating
-        assertThat(device.rests(Basis.INVENTED)).isFalse();
-        assertThat(device.rests(Basis.MAKER)).isTrue();
+        assertThat(device.resting(Basis.INVENTED)).isEmpty();
+        assertThat(device.resting(Basis.MAKER)).isNotEmpty();
         assertThat(device.inOrder().keySet()).containsExactly(DeviceParameter.BASE_RESISTANCE, DeviceParameter.CURRENT);
         assertThat(device(DeviceKind.BIPOLAR, Polarity.NPN, A_GAIN, Map.of()).ratedAmps())
                 .isEmpty();
