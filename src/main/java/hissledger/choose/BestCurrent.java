@@ -76,7 +76,7 @@ public final class BestCurrent {
         double[] y = new double[points];
         double scale = Double.POSITIVE_INFINITY;
         for (int k = 0; k < points; k++) {
-            x[k] = from + (to - from) * k / (points - 1);
+            x[k] = k == points - 1 ? to : from + (to - from) * k / (points - 1);
             y[k] = power.applyAsDouble(x[k]);
             scale = Math.min(scale, y[k]);
         }

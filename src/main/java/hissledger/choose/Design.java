@@ -5,6 +5,7 @@ import hissledger.circuit.FrontEnd;
 import hissledger.circuit.PathElement;
 import hissledger.circuit.Source;
 import hissledger.circuit.Stage;
+import hissledger.circuit.StagePlan;
 import hissledger.device.AmplifierModel;
 import hissledger.device.BiasedBipolar;
 import hissledger.device.BiasedJfet;
@@ -26,6 +27,7 @@ import java.util.function.DoubleFunction;
  * @param stage the stage at a given current of each device, A
  * @param range the currents that a search may try
  * @param defaultsUsed what had to be assumed for the device, one sentence each
+ * @param kelvin temperature of the stage, K
  */
 public record Design(
         Candidate candidate,
@@ -33,7 +35,8 @@ public record Design(
         List<PathElement> path,
         DoubleFunction<Stage> stage,
         CurrentRange range,
-        List<String> defaultsUsed) {
+        List<String> defaultsUsed,
+        double kelvin) {
     /** Least current that a search tries where nothing else bounds it, A. */
     public static final double LEAST_AMPS = 1e-6;
 
@@ -55,8 +58,11 @@ public record Design(
     public static Design of(Scenario scenario, Candidate candidate) {
         List<PathElement> path = new ArrayList<>(scenario.path());
         path.addAll(candidate.path());
+        return resolved(candidate, scenario.source(), path, scenario.temperatureKelvin());
+    }
+
+    private static Design resolved(Candidate candidate, Source source, List<PathElement> path, double kelvin) {
         Device device = candidate.device();
-        double kelvin = scenario.temperatureKelvin();
         CurrentRange free =
                 new CurrentRange(LEAST_AMPS, "least current tried", GREATEST_AMPS, "greatest current tried");
         if (device.ratedAmps().isPresent()) {
@@ -84,7 +90,7 @@ public record Design(
             }
             default -> throw new IllegalStateException("unknown kind of device: " + device.kind());
         }
-        return new Design(candidate, scenario.source(), path, stage, asked(candidate, free), defaults);
+        return new Design(candidate, source, path, stage, asked(candidate, free), defaults, kelvin);
     }
 
     /** The gain curve is continued for one decade beyond its points; a search does not leave that. */
@@ -122,6 +128,50 @@ public record Design(
 
     /** This design behind another source. */
     public Design withSource(Source other) {
-        return new Design(candidate, other, path, stage, range, defaultsUsed);
+        return new Design(candidate, other, path, stage, range, defaultsUsed, kelvin);
+    }
+
+    /** This design with an open value chosen. */
+    public Design with(OpenValue open, double value) {
+        if (open instanceof OpenValue.Count) {
+            StagePlan plan = candidate.plan();
+            return withPlan(new StagePlan(plan.arrangement(), (int) Math.rint(value), plan.around(), plan.pair()));
+        }
+        List<PathElement> changed = new ArrayList<>(path);
+        for (int k = 0; k < changed.size(); k++) {
+            PathElement element = changed.get(k);
+            if (open instanceof OpenValue.Ratio ratio && element.name().equals(ratio.element())) {
+                changed.set(k, ratio.set(element, value));
+            } else if (open instanceof OpenValue.Resistance ohms
+                    && element.name().equals(ohms.element())) {
+                changed.set(k, ohms.set(element, value));
+            }
+        }
+        return new Design(candidate, source, changed, stage, range, defaultsUsed, kelvin);
+    }
+
+    /** This design with another stage plan around the same device. */
+    public Design withPlan(StagePlan plan) {
+        Candidate changed = new Candidate(
+                candidate.name(), candidate.device(), plan, candidate.current(), candidate.path(), candidate.open());
+        return resolved(changed, source, path, kelvin);
+    }
+
+    /** This design with one element of its path replaced. */
+    public Design withElement(int index, PathElement element) {
+        List<PathElement> changed = new ArrayList<>(path);
+        changed.set(index, element);
+        return new Design(candidate, source, changed, stage, range, defaultsUsed, kelvin);
+    }
+
+    /** This design with currents of each device limited to at most {@code amps}, A. */
+    public Design atMost(double amps, String reason) {
+        return new Design(candidate, source, path, stage, range.atMost(amps, reason), defaultsUsed, kelvin);
+    }
+
+    /** How many devices carry the current, both sides of a pair counted. */
+    public int deviceCount() {
+        StagePlan plan = candidate.plan();
+        return plan.arrangement().isPair() ? 2 * plan.inParallel() : plan.inParallel();
     }
 }

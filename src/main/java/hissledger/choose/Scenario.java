@@ -18,6 +18,7 @@ import java.util.List;
  * @param source the transducer
  * @param path passive elements from the source toward the stage, shared by all candidates
  * @param candidates at least one
+ * @param limits what a search must respect
  */
 public record Scenario(
         String title,
@@ -28,7 +29,8 @@ public record Scenario(
         Target target,
         Source source,
         List<PathElement> path,
-        List<Candidate> candidates) {
+        List<Candidate> candidates,
+        Limits limits) {
     /** Temperature where a scenario states none, K. */
     public static final double USUAL_KELVIN = 300.0;
 
@@ -42,13 +44,33 @@ public record Scenario(
         }
     }
 
+    /** A scenario without limits to a search. */
+    public Scenario(
+            String title,
+            String note,
+            double temperatureKelvin,
+            Band band,
+            List<Double> spotsHertz,
+            Target target,
+            Source source,
+            List<PathElement> path,
+            List<Candidate> candidates) {
+        this(title, note, temperatureKelvin, band, spotsHertz, target, source, path, candidates, Limits.none());
+    }
+
     /** This scenario with another source. */
     public Scenario withSource(Source other) {
-        return new Scenario(title, note, temperatureKelvin, band, spotsHertz, target, other, path, candidates);
+        return new Scenario(title, note, temperatureKelvin, band, spotsHertz, target, other, path, candidates, limits);
     }
 
     /** This scenario with some of its candidates. */
     public Scenario withCandidates(List<Candidate> chosen) {
-        return new Scenario(title, note, temperatureKelvin, band, spotsHertz, target, source, path, chosen);
+        return new Scenario(title, note, temperatureKelvin, band, spotsHertz, target, source, path, chosen, limits);
+    }
+
+    /** This scenario with another path. */
+    public Scenario withPath(List<PathElement> other) {
+        return new Scenario(
+                title, note, temperatureKelvin, band, spotsHertz, target, source, other, candidates, limits);
     }
 }

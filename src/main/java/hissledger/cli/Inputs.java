@@ -25,6 +25,11 @@ final class Inputs {
                     "a folder of device files that add to the shipped ones or replace them by id; may be repeated")
     private List<Path> folders = new ArrayList<>();
 
+    /** The scenario file, as the user named it. */
+    String file() {
+        return scenario.toString();
+    }
+
     /** Reads the scenario and makes sure that each candidate can be computed. */
     Scenario read() throws InputException {
         Scenario read = ScenarioReader.read(scenario, Catalogue.load(folders));

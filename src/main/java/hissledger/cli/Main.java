@@ -16,7 +16,14 @@ import picocli.CommandLine.Spec;
         mixinStandardHelpOptions = true,
         description = "Which input device, how many, at what current, in what circuit, and what the hiss will be.",
         synopsisSubcommandLabel = "VERB",
-        subcommands = {LedgerVerb.class, CompareVerb.class, DevicesVerb.class, NewVerb.class, SchemaVerb.class},
+        subcommands = {
+            LedgerVerb.class,
+            CompareVerb.class,
+            OptimumVerb.class,
+            DevicesVerb.class,
+            NewVerb.class,
+            SchemaVerb.class
+        },
         footer = {
             "",
             "Example:",

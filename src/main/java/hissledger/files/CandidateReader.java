@@ -42,7 +42,7 @@ final class CandidateReader {
     }
 
     /** Names what does not go together. */
-    void check(Set<String> names) {
+    void check(Set<String> names, List<Located<Fields>> sharedPath) {
         fields.located(CandidateKeys.NAME).ifPresent(name -> {
             if (!names.add(name.value())) {
                 faults.at(
@@ -57,6 +57,9 @@ final class CandidateReader {
         fields.located(CandidateKeys.CURRENT).ifPresent(stated -> current = currentChoice(stated.value()));
         fields.located(CandidateKeys.ARRANGEMENT).ifPresent(this::checkArrangement);
         checkCurrent();
+        fields.get(CandidateKeys.OPEN)
+                .ifPresent(open -> new OpenReader(faults)
+                        .check(open, sharedPath, fields.get(CandidateKeys.PATH).orElse(List.of())));
     }
 
     private void checkDevice(Located<String> id) {
@@ -237,7 +240,8 @@ final class CandidateReader {
                 new StagePlan(arrangement, fields.get(CandidateKeys.IN_PARALLEL, 1), around, pairParts(arrangement)),
                 current.orElse(new CurrentChoice.None()),
                 PathReader.elements(
-                        fields.get(CandidateKeys.PATH).orElse(List.of()), kelvin, new HashSet<>(sharedNames)));
+                        fields.get(CandidateKeys.PATH).orElse(List.of()), kelvin, new HashSet<>(sharedNames)),
+                fields.get(CandidateKeys.OPEN).map(OpenReader::values).orElse(List.of()));
     }
 
     private PairParts pairParts(Arrangement arrangement) {

@@ -1,6 +1,7 @@
 package hissledger.files;
 
 import hissledger.choose.Candidate;
+import hissledger.choose.Limits;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.circuit.PathElement;
@@ -18,6 +19,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 
 /**
@@ -65,6 +67,7 @@ public final class ScenarioReader {
         }
         fields.get(ScenarioKeys.PATH).ifPresent(path -> PathReader.check(path, faults));
         fields.get(ScenarioKeys.TARGET).ifPresent(target -> checkTarget(target, fields));
+        fields.get(ScenarioKeys.SEARCH_LIMITS).ifPresent(this::checkLimits);
         List<CandidateReader> candidates = candidates(fields);
         if (!elsewhere.isEmpty()) {
             List<Fault> all = new ArrayList<>(elsewhere);
@@ -95,7 +98,8 @@ public final class ScenarioReader {
                 target(fields),
                 SourceReader.source(fields.need(ScenarioKeys.SOURCE), table, kelvin),
                 path,
-                ready);
+                ready,
+                limits(fields));
     }
 
     private Optional<Band> band(Fields fields) {
@@ -150,6 +154,28 @@ public final class ScenarioReader {
         }
     }
 
+    private void checkLimits(Fields limits) {
+        limits.located(ScenarioKeys.POWER).ifPresent(power -> {
+            if (limits.get(ScenarioKeys.SUPPLY).isEmpty()) {
+                faults.at(power.node(), "needs the voltage it is drawn at; add limits.supply, like \"12 V\"");
+            }
+        });
+    }
+
+    private static Limits limits(Fields fields) {
+        Optional<Fields> limits = fields.get(ScenarioKeys.SEARCH_LIMITS);
+        return new Limits(
+                optional(limits.flatMap(each -> each.get(ScenarioKeys.TOTAL_CURRENT))),
+                optional(limits.flatMap(each -> each.get(ScenarioKeys.SUPPLY))),
+                optional(limits.flatMap(each -> each.get(ScenarioKeys.POWER))),
+                optional(limits.flatMap(each -> each.get(ScenarioKeys.HEADROOM)).map(ScenarioReader::limit)),
+                optional(limits.flatMap(each -> each.get(ScenarioKeys.INPUT_CAPACITANCE))));
+    }
+
+    private static OptionalDouble optional(Optional<Double> value) {
+        return value.isPresent() ? OptionalDouble.of(value.get()) : OptionalDouble.empty();
+    }
+
     private static Target target(Fields fields) {
         Map<Figure, Double> limits = new EnumMap<>(Figure.class);
         fields.get(ScenarioKeys.TARGET)
@@ -171,7 +197,7 @@ public final class ScenarioReader {
         Set<String> names = new HashSet<>();
         for (Located<Fields> candidate : fields.get(ScenarioKeys.CANDIDATES).orElse(List.of())) {
             CandidateReader reader = new CandidateReader(candidate.value(), faults, elsewhere, catalogue);
-            reader.check(names);
+            reader.check(names, fields.get(ScenarioKeys.PATH).orElse(List.of()));
             candidates.add(reader);
         }
         return candidates;

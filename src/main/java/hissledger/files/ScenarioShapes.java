@@ -260,6 +260,35 @@ final class ScenarioShapes {
                 Values.object(Shape.of("the other side", OTHER_RESISTOR)),
                 "the other input of a single-ended pair");
 
+        /* values that a search may choose */
+        static final Key<String> OF = Key.required("of", Values.text(), "the name of the path element");
+        static final Key<Integer> LEAST_COUNT =
+                Key.required("from", Values.whole(1, MOST_IN_PARALLEL), "least devices in parallel, >= 1");
+        static final Key<Integer> GREATEST_COUNT =
+                Key.required("to", Values.whole(1, MOST_IN_PARALLEL), "most devices in parallel");
+        static final Key<Double> LEAST_RATIO =
+                Key.required("from", Values.number(Range.POSITIVE), "least secondary over primary turns, > 0");
+        static final Key<Double> GREATEST_RATIO =
+                Key.required("to", Values.number(Range.POSITIVE), "greatest secondary over primary turns");
+        static final Key<Double> LEAST_OHMS = Key.required("from", ohms(), "least resistance, > 0 ohm");
+        static final Key<Double> GREATEST_OHMS = Key.required("to", ohms(), "greatest resistance");
+        static final Key<Fields> OPEN_COUNT = Key.optional(
+                "inParallel",
+                Values.object(Shape.of("an open count", LEAST_COUNT, GREATEST_COUNT)),
+                "range of the devices in parallel");
+        static final Key<Fields> OPEN_RATIO = Key.optional(
+                "ratio",
+                Values.object(Shape.of("an open ratio", OF, LEAST_RATIO, GREATEST_RATIO)),
+                "range of a transformer's ratio; its secondary resistance and leakage go with the square of the ratio");
+        static final Key<Fields> OPEN_RESISTOR = Key.optional(
+                "resistor",
+                Values.object(Shape.of("an open resistor", OF, LEAST_OHMS, GREATEST_OHMS)),
+                "range of a resistor of the path");
+        static final Key<Fields> OPEN = Key.optional(
+                "open",
+                Values.object(Shape.of("open values", OPEN_COUNT, OPEN_RATIO, OPEN_RESISTOR)),
+                "values that the verb optimum chooses; other verbs take them as they are stated");
+
         static final Shape SHAPE = Shape.of(
                 "a candidate",
                 NAME,
@@ -274,7 +303,8 @@ final class ScenarioShapes {
                 CASCODE,
                 GAIN_RESISTOR,
                 FEEDBACK_RESISTOR,
-                OTHER_SIDE);
+                OTHER_SIDE,
+                OPEN);
     }
 
     /** The scenario itself. */
@@ -296,6 +326,27 @@ final class ScenarioShapes {
                 "spots",
                 Values.list(quantity(Dimension.FREQUENCY, HERTZ), 1),
                 "frequencies of the printed densities; 100 Hz, 1 kHz, 10 kHz unless stated");
+        static final Key<Double> TOTAL_CURRENT = Key.optional(
+                "totalCurrent", quantity(Dimension.CURRENT, Range.POSITIVE), "greatest current of all devices, > 0 A");
+        static final Key<Double> SUPPLY = Key.optional(
+                "supply", quantity(Dimension.VOLTAGE, Range.POSITIVE), "supply voltage, > 0 V; for the power");
+        static final Key<Double> POWER = Key.optional(
+                "power",
+                quantity(Dimension.POWER, Range.POSITIVE),
+                "greatest power of all devices at the supply, > 0 W");
+        static final Key<Quantities.Parsed> HEADROOM = Key.optional(
+                "headroom",
+                Values.written(Dimension.LEVEL, Range.POSITIVE),
+                "least EMF at 1 kHz before 1 % of the stage's lowest harmonic, V, dBu or dBV");
+        static final Key<Double> INPUT_CAPACITANCE = Key.optional(
+                "inputCapacitance",
+                quantity(Dimension.CAPACITANCE, Range.POSITIVE),
+                "greatest input capacitance of the stage at 1 kHz, > 0 F");
+        static final Key<Fields> SEARCH_LIMITS = Key.optional(
+                "limits",
+                Values.object(
+                        Shape.of("the limits of a search", TOTAL_CURRENT, SUPPLY, POWER, HEADROOM, INPUT_CAPACITANCE)),
+                "what the verb optimum must respect");
         static final Map<Figure, Key<Quantities.Parsed>> LIMITS = limits();
         static final Key<Fields> TARGET = Key.optional(
                 "target", Values.object(new Shape("a target", List.copyOf(LIMITS.values()))), "limits to be met");
@@ -309,8 +360,19 @@ final class ScenarioShapes {
                 Values.list(Values.object(CandidateKeys.SHAPE), 1),
                 "ways to build the stage, at least one");
 
-        static final Shape SHAPE =
-                Shape.of("a scenario", SCHEMA, TITLE, NOTE, TEMPERATURE, BAND, SPOTS, TARGET, SOURCE, PATH, CANDIDATES);
+        static final Shape SHAPE = Shape.of(
+                "a scenario",
+                SCHEMA,
+                TITLE,
+                NOTE,
+                TEMPERATURE,
+                BAND,
+                SPOTS,
+                TARGET,
+                SEARCH_LIMITS,
+                SOURCE,
+                PATH,
+                CANDIDATES);
 
         private static Map<Figure, Key<Quantities.Parsed>> limits() {
             Map<Figure, Key<Quantities.Parsed>> limits = new LinkedHashMap<>();

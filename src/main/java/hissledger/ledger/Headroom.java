@@ -29,11 +29,12 @@ public record Headroom(
     /** The headroom of a front end with a given flat EIN, V rms; empty where the device law does not tell. */
     static Optional<Headroom> of(FrontEnd frontEnd, double einVolts) {
         Harmonics.Limit limit = frontEnd.stage().onePercent();
-        if (limit.inputVolts().isEmpty()) {
+        OptionalDouble level = emfVolts(frontEnd);
+        if (limit.inputVolts().isEmpty() || level.isEmpty()) {
             return Optional.empty();
         }
         double stageVolts = limit.inputVolts().getAsDouble();
-        double emf = stageVolts / transfer(frontEnd);
+        double emf = level.getAsDouble();
         Signal signal = frontEnd.source().signal();
         OptionalDouble sound = signal.isAcoustic()
                 ? OptionalDouble.of(Decibels.ofAmplitudeRatio(
@@ -41,6 +42,12 @@ public record Headroom(
                 : OptionalDouble.empty();
         return Optional.of(
                 new Headroom(limit.harmonic(), stageVolts, emf, sound, Decibels.ofAmplitudeRatio(emf / einVolts)));
+    }
+
+    /** The EMF at 1 kHz that makes 1 % of the stage's lowest harmonic, V rms; empty where the device law does not tell. */
+    public static OptionalDouble emfVolts(FrontEnd frontEnd) {
+        OptionalDouble stage = frontEnd.stage().onePercent().inputVolts();
+        return stage.isPresent() ? OptionalDouble.of(stage.getAsDouble() / transfer(frontEnd)) : stage;
     }
 
     /** |Vstage/EMF| at 1 kHz: A of the stage over the a of the whole chain, or of the path where the stage does not load. */

@@ -2,6 +2,7 @@ package hissledger.report;
 
 import hissledger.choose.Comparison;
 import hissledger.choose.Evaluation;
+import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.ledger.Entry;
@@ -87,6 +88,28 @@ public final class Csv {
                 entry.spotVoltsPerRootHertz().forEach(density -> cells.add(number(density)));
                 record(text, cells);
             }
+        }
+        return text.toString();
+    }
+
+    /** One row a candidate of a search over open values. */
+    public static String optimum(List<OptimumText.Searched> searched) {
+        StringBuilder text = new StringBuilder();
+        record(text, List.of("candidate", "device", "deviceCount", "current_A", "ein_V", "ein_dBu", "chosen"));
+        for (OptimumText.Searched each : searched) {
+            OpenSearch.Choice best = each.outcome().best();
+            List<String> chosen = new ArrayList<>();
+            best.values().forEach((open, value) -> chosen.add(open.name() + "=" + number(value)));
+            record(
+                    text,
+                    List.of(
+                            each.candidate().name(),
+                            each.candidate().device().id(),
+                            String.valueOf(best.design().deviceCount()),
+                            number(best.amps()),
+                            number(best.einVolts()),
+                            number(Decibels.dbu(best.einVolts())),
+                            String.join("; ", chosen)));
         }
         return text.toString();
     }

@@ -3,7 +3,9 @@ package hissledger.report;
 import hissledger.choose.BestCurrent;
 import hissledger.choose.Comparison;
 import hissledger.choose.Evaluation;
+import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
+import hissledger.choose.Sensitivity;
 import hissledger.ledger.Entry;
 import hissledger.ledger.EntrySpectrum;
 import hissledger.ledger.Figure;
@@ -70,6 +72,44 @@ public final class ResultTree {
             candidate.put("frequency_Hz", spectrum.hertz());
             candidate.put("entry_V_rtHz", spectrum.entryVoltsPerRootHertz());
             candidate.put("ein_V_rtHz", spectrum.einVoltsPerRootHertz());
+            candidates.add(candidate);
+        }
+        tree.put("candidates", candidates);
+        return tree;
+    }
+
+    /** The outcome of a search over open values. */
+    public static Map<String, Object> optimum(Scenario scenario, Figure figure, List<OptimumText.Searched> searched) {
+        Map<String, Object> tree = head(scenario);
+        tree.put("figure", figure.key());
+        List<Object> candidates = new ArrayList<>();
+        for (OptimumText.Searched each : searched) {
+            OpenSearch.Choice best = each.outcome().best();
+            Map<String, Object> candidate = new LinkedHashMap<>();
+            candidate.put("name", each.candidate().name());
+            candidate.put("device", each.candidate().device().id());
+            candidate.put("current_A", best.amps());
+            candidate.put("deviceCount", best.design().deviceCount());
+            candidate.put("ein_V", best.einVolts());
+            candidate.put("ein_dBu", Decibels.dbu(best.einVolts()));
+            candidate.put("closedFormCurrent_A", each.closedFormAmps());
+            Map<String, Object> chosen = new LinkedHashMap<>();
+            best.values().forEach((open, value) -> chosen.put(open.name(), value));
+            candidate.put("chosen", chosen);
+            Map<String, Object> zones = new LinkedHashMap<>();
+            each.outcome().zones().forEach((open, zone) -> zones.put(open.name(), List.of(zone.from(), zone.to())));
+            candidate.put("flatZones", zones);
+            each.outcome().currentSearch().ifPresent(current -> candidate.put("bestCurrent", optimum(current)));
+            List<Object> sensitivities = new ArrayList<>();
+            for (Sensitivity sensitivity : each.sensitivities()) {
+                Map<String, Object> row = new LinkedHashMap<>();
+                row.put("name", sensitivity.name());
+                row.put("perPercent_dB", sensitivity.perPercentDecibels());
+                row.put("atLeast_dB", sensitivity.atLeastDecibels());
+                row.put("atGreatest_dB", sensitivity.atGreatestDecibels());
+                sensitivities.add(row);
+            }
+            candidate.put("sensitivities", sensitivities);
             candidates.add(candidate);
         }
         tree.put("candidates", candidates);

@@ -66,7 +66,8 @@ class BestCurrentTest {
                 List.of(),
                 amps -> new SingleStage(new BiasedBipolar(model, amps, KELVIN), 1, LOADED),
                 range,
-                List.of());
+                List.of(),
+                KELVIN);
     }
 
     private static final CurrentRange WIDE = new CurrentRange(1e-6, "low", 0.1, "high");

@@ -135,6 +135,43 @@ class MainTest {
     }
 
     @Test
+    void optimumChoosesWhatIsOpenAndSaysHowFlatItIs() {
+        Outcome outcome = run("optimum", SCENARIOS.resolve("ribbon-bare.json").toString());
+        assertThat(outcome.err()).isEmpty();
+        assertThat(outcome.exit()).isZero();
+        assertThat(outcome.out())
+                .contains(
+                        "ratio of step-up 1:",
+                        "devices in parallel",
+                        "Runner-up:",
+                        "What moves it",
+                        "within 0.1 dB from");
+        assertThat(run("optimum", SCENARIOS.resolve("cartridge-mc.json").toString())
+                        .out())
+                .contains("Limits: current of all devices at most 20 mA; power at most 360 mW from 18 V.")
+                .containsPattern("held back by: current or power\\s+limit of the\\s+scenario");
+        assertThat(run("optimum", VOCAL, "--json", "-").out()).contains("\"sensitivities\"", "\"closedFormCurrent_A\"");
+    }
+
+    @Test
+    void openValuesThatNameNothingOrLeaveNothing() throws java.io.IOException {
+        String shipped = Files.readString(SCENARIOS.resolve("ribbon-bare.json"));
+        String unnamed = file(
+                "unnamed.json",
+                shipped.replace(
+                        "\"of\": \"step-up\", \"from\": 5, \"to\": 120", "\"of\": \"step\", \"from\": 5, \"to\": 3"));
+        assertThat(run("optimum", unnamed).err().lines().map(line -> line.replaceFirst("^.*?json:[0-9]+:[0-9]+: ", "")))
+                .containsExactly(
+                        "candidates[1].open.ratio.of names no transformer of the path, \"step\"; use one of step-up",
+                        "candidates[1].open.ratio.to must be above from, or there is nothing to choose; was 3");
+        String hungry = file(
+                "hungry.json",
+                shipped.replace("\"candidates\": [", "\"limits\": { \"power\": \"1 mW\" },\n  \"candidates\": ["));
+        assertThat(run("optimum", hungry).err())
+                .contains("limits.power needs the voltage it is drawn at; add limits.supply");
+    }
+
+    @Test
     void newWritesAStarterOnceAndSchemaDescribesIt() throws java.io.IOException {
         Path scenario = folder.resolve("mine.json");
         assertThat(run("new", "scenario", scenario.toString()).out())

@@ -55,7 +55,7 @@ class ScenarioFaultsTest {
                 .containsExactly(
                         "t.json:1:1: a scenario has no title: the title of every result",
                         "t.json:2:3: tilte is not a key of a scenario; did you mean title? Known are $schema, title, note, "
-                                + "temperature, band, spots, target, source, path, candidates",
+                                + "temperature, band, spots, target, limits, source, path, candidates",
                         "t.json:3:45: source.resistance must be finite and >= 0 Ω, was \"-1 ohm\"",
                         "t.json:3:69: source.inductance must be an inductance with its unit in quotes, was the bare number 5; "
                                 + "write it like \"5 mH\"",
