@@ -144,13 +144,17 @@ public final class ScenarioReader {
             return;
         }
         boolean acoustic = fields.get(ScenarioKeys.SOURCE)
-                .flatMap(source -> source.get(SourceKeys.SENSITIVITY))
-                .filter(sensitivity -> sensitivity.unit().endsWith("/" + Signal.PASCAL))
-                .isPresent();
+                        .flatMap(source -> source.get(SourceKeys.SENSITIVITY))
+                        .filter(sensitivity -> sensitivity.unit().endsWith("/" + Signal.PASCAL))
+                        .isPresent()
+                && fields.get(ScenarioKeys.SOURCE)
+                        .flatMap(source -> source.get(SourceKeys.MEDIUM))
+                        .filter(medium -> !medium.equals("air"))
+                        .isEmpty();
         if (!acoustic) {
             faults.at(
                     target.located(noiseLevel).orElseThrow().node(),
-                    "needs a sensitivity of the source in V/Pa; add source.sensitivity, like \"1.8 mV/Pa\"");
+                    "needs a sensitivity of the source in V/Pa, in air; add source.sensitivity, like \"1.8 mV/Pa\"");
         }
     }
 

@@ -64,6 +64,10 @@ final class ScenarioShapes {
                 "sensitivity",
                 Values.written(Dimension.SENSITIVITY, Range.POSITIVE),
                 "EMF per unit of stimulus, > 0 V/Pa");
+        static final Key<String> MEDIUM = Key.optional(
+                "medium",
+                Values.word(List.of("air", "water"), word -> word),
+                "what the sound pressure of a sensitivity in V/Pa is in; air unless stated: levels in dB SPL are for air");
         static final Key<Quantities.Parsed> REFERENCE_LEVEL = Key.optional(
                 "referenceLevel",
                 Values.written(Dimension.REFERENCE_LEVEL, Range.POSITIVE),
@@ -82,7 +86,7 @@ final class ScenarioShapes {
         }
 
         private static Shape source(String words, Key<?>... own) {
-            return Shape.of(words, KIND).with(own).with(TEMPERATURE, SENSITIVITY, REFERENCE_LEVEL);
+            return Shape.of(words, KIND).with(own).with(TEMPERATURE, SENSITIVITY, MEDIUM, REFERENCE_LEVEL);
         }
     }
 

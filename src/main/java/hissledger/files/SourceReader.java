@@ -21,6 +21,7 @@ import java.util.Set;
 final class SourceReader {
     private static final double NO_PART = Double.POSITIVE_INFINITY;
     private static final String SOUND_PRESSURE = "dB SPL";
+    private static final String AIR = "air";
 
     private SourceReader() {}
 
@@ -118,8 +119,9 @@ final class SourceReader {
         OptionalDouble reference = level.isPresent()
                 ? OptionalDouble.of(referenceVolts(level.get(), voltsPerUnit.orElse(1.0)))
                 : OptionalDouble.empty();
-        return new Signal(
-                voltsPerUnit, sensitivity.map(SourceReader::stimulusUnit).orElse(""), reference);
+        String medium = source.get(SourceKeys.MEDIUM, AIR).equals(AIR) ? "" : " in water";
+        String unit = sensitivity.map(each -> stimulusUnit(each) + medium).orElse("");
+        return new Signal(voltsPerUnit, unit, reference);
     }
 
     private static double referenceVolts(Quantities.Parsed level, double voltsPerUnit) {

@@ -270,7 +270,7 @@ class MainTest {
                         path + ":3:13: source has no resistance: DC resistance, >= 0 ohm",
                         path + ":3:31: source.resistanse is not a key of a coil source; did you mean resistance?"
                                 + " Known are kind, resistance, inductance, parallelResistance, parallelCapacitance,"
-                                + " temperature, sensitivity, referenceLevel",
+                                + " temperature, sensitivity, medium, referenceLevel",
                         path
                                 + ":3:70: source.inductance must be an inductance with its unit in quotes, was the bare number 3;"
                                 + " write it like \"3 mH\"",

@@ -295,7 +295,7 @@ class ScenarioReaderTest {
                 .isEqualTo("band.to must be above band.from, 1 kHz, was \"100 Hz\"");
         assertThat(message(SOURCE + ", \"target\": { \"equivalentNoiseLevel\": \"15 dB\" }", CANDIDATE))
                 .isEqualTo(
-                        "target.equivalentNoiseLevel needs a sensitivity of the source in V/Pa; add source.sensitivity,"
+                        "target.equivalentNoiseLevel needs a sensitivity of the source in V/Pa, in air; add source.sensitivity,"
                                 + " like \"1.8 mV/Pa\"");
         assertThat(message(
                         "\"source\": { \"kind\": \"resistor\", \"resistance\": \"1 ohm\", \"referenceLevel\": \"94 dB SPL\" }",
