@@ -62,6 +62,7 @@ final class Look {
     private static final int MARKERS = 11;
 
     private static final float LINE = 2.9f;
+    private static final float ZONE_LINE = 8.0f;
     private static final float FLOOR_LINE = 2.4f;
     private static final float LIMIT_LINE = 2.0f;
     private static final float PLACE_LINE = 1.4f;
@@ -109,7 +110,7 @@ final class Look {
     /** The colour of a trace. */
     static Color colour(Trace.Role role, int number) {
         return switch (role) {
-            case CANDIDATE, POINTS -> COLOURS.get(number % COLOURS.size());
+            case CANDIDATE, POINTS, ZONE -> COLOURS.get(number % COLOURS.size());
             case FLOOR -> INK;
             case LIMIT -> RULE;
         };
@@ -118,6 +119,7 @@ final class Look {
     /** The line of a trace. */
     static BasicStroke stroke(Trace.Role role, int number, double scale) {
         return switch (role) {
+            case ZONE -> stroke(ZONE_LINE, new float[0], scale);
             case CANDIDATE, POINTS -> stroke(LINE, DASHES[number % DASHES.length], scale);
             case FLOOR -> stroke(FLOOR_LINE, FLOOR_DASH, scale);
             case LIMIT -> stroke(LIMIT_LINE, LIMIT_DASH, scale);

@@ -167,6 +167,7 @@ final class PlateDrawing {
         List<Name> names = List.of();
         for (Setting setting : SETTINGS) {
             names = plate.traces().stream()
+                    .filter(trace -> trace.role() != Trace.Role.ZONE)
                     .map(trace -> name(trace, setting, width))
                     .toList();
             if (stackHeight(names) <= height) {
@@ -298,6 +299,7 @@ final class PlateDrawing {
             renderer.setSeriesStroke(k, Look.stroke(trace.role(), trace.number(), scale));
             renderer.setSeriesShape(k, Look.marker(trace.number(), scale));
         }
+        plate.shades().forEach(shade -> renderer.addAnnotation(new BandShade(shade), Layer.BACKGROUND));
         floor(plate).ifPresent(trace -> renderer.addAnnotation(new FloorShade(trace), Layer.BACKGROUND));
 
         ValueAxis across = RuledAxes.of(plate.across());

@@ -22,7 +22,9 @@ record Trace(Role role, int number, String name, String detail, List<Double> x, 
         /** A limit of the target. */
         LIMIT,
         /** Points without a line between them. */
-        POINTS
+        POINTS,
+        /** The part of a candidate's line that costs next to nothing: drawn broad, without a name. */
+        ZONE
     }
 
     Trace {

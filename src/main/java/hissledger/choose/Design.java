@@ -150,6 +150,13 @@ public record Design(
         return new Design(candidate, source, changed, stage, range, defaultsUsed, kelvin);
     }
 
+    /** This design with another device of the same kind. */
+    public Design withDevice(Device device) {
+        Candidate changed = new Candidate(
+                candidate.name(), device, candidate.plan(), candidate.current(), candidate.path(), candidate.open());
+        return resolved(changed, source, path, kelvin);
+    }
+
     /** This design with another stage plan around the same device. */
     public Design withPlan(StagePlan plan) {
         Candidate changed = new Candidate(

@@ -2,20 +2,14 @@ package hissledger.choose;
 
 import hissledger.circuit.FrontEnd;
 import hissledger.device.Device;
-import hissledger.device.DeviceParameter;
-import hissledger.device.GainPoint;
 import hissledger.device.GainSheet;
-import hissledger.device.Parameter;
 import hissledger.ledger.BandWalk;
 import hissledger.physics.Band;
 import hissledger.physics.Decibels;
 import hissledger.physics.Weighting;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.EnumMap;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
 
@@ -43,7 +37,7 @@ public record Sensitivity(
             if (!key.isRating()) {
                 found.add(sensitivity(
                         key.words(),
-                        value -> sweep.with(replaced(device, key, parameter, value)),
+                        value -> sweep.with(device.with(key, value)),
                         parameter.representative(),
                         parameter.min(),
                         parameter.max()));
@@ -81,62 +75,13 @@ public record Sensitivity(
     private static Sensitivity gain(Sweep sweep, Device device, GainSheet sheet) {
         boolean least = sheet.points().stream().anyMatch(point -> point.min().isPresent());
         boolean greatest = sheet.points().stream().anyMatch(point -> point.max().isPresent());
-        double atLeast = sweep.with(curve(device, sheet, 0, 1.0));
-        double atGreatest = sweep.with(curve(device, sheet, 2, 1.0));
+        double atLeast = sweep.with(device.with(sheet.least(), 1.0));
+        double atGreatest = sweep.with(device.with(sheet.greatest(), 1.0));
         return new Sensitivity(
                 "current gain hFE",
-                sweep.with(curve(device, sheet, 1, PERCENT)),
+                sweep.with(device.with(sheet.typical(), PERCENT)),
                 least ? OptionalDouble.of(atLeast) : OptionalDouble.empty(),
                 greatest ? OptionalDouble.of(atGreatest) : OptionalDouble.empty());
-    }
-
-    /** The device with its least (0), typical (1) or greatest (2) gain curve for its only one, times a factor. */
-    private static Device curve(Device device, GainSheet sheet, int which, double factor) {
-        List<GainPoint> points = new ArrayList<>();
-        for (GainPoint point : sheet.points()) {
-            double amps = point.currentAmps();
-            double gain = switch (which) {
-                case 0 -> sheet.least().at(amps);
-                case 1 -> sheet.typical().at(amps);
-                default -> sheet.greatest().at(amps);
-            };
-            points.add(new GainPoint(
-                    amps, OptionalDouble.empty(), OptionalDouble.of(gain * factor), OptionalDouble.empty()));
-        }
-        return new Device(
-                device.id(),
-                device.kind(),
-                device.polarity(),
-                device.description(),
-                device.evidence(),
-                device.note(),
-                Optional.of(new GainSheet(points, sheet.basis(), sheet.reference(), sheet.conditions())),
-                device.parameters(),
-                List.of());
-    }
-
-    private static Device replaced(Device device, DeviceParameter key, Parameter parameter, double value) {
-        Map<DeviceParameter, Parameter> parameters = new EnumMap<>(device.parameters());
-        parameters.put(
-                key,
-                new Parameter(
-                        OptionalDouble.empty(),
-                        OptionalDouble.of(value),
-                        OptionalDouble.empty(),
-                        parameter.basis(),
-                        parameter.reference(),
-                        parameter.conditions(),
-                        parameter.at()));
-        return new Device(
-                device.id(),
-                device.kind(),
-                device.polarity(),
-                device.description(),
-                device.evidence(),
-                device.note(),
-                device.currentGain(),
-                parameters,
-                List.of());
     }
 
     /** The EIN with one thing changed, as a change from what it was. */
@@ -156,10 +101,7 @@ public record Sensitivity(
         }
 
         double with(Device device) {
-            Candidate stated = design.candidate();
-            Candidate changed =
-                    new Candidate(stated.name(), device, stated.plan(), stated.current(), List.of(), List.of());
-            Design other = Design.of(scenario.withPath(design.path()), changed);
+            Design other = design.withDevice(device);
             double saturation = other.range().toAmps();
             return change(other.at(Math.min(amps, saturation)));
         }

@@ -1,7 +1,9 @@
 package hissledger.cli;
 
+import hissledger.chart.OptimumChart;
 import hissledger.choose.Candidate;
 import hissledger.choose.Comparison;
+import hissledger.choose.CurrentSweep;
 import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
 import hissledger.choose.Sensitivity;
@@ -30,7 +32,11 @@ import picocli.CommandLine.Spec;
         description =
                 "Chooses what the scenario leaves open: current, devices in parallel, transformer ratio, a resistor;"
                         + " says how flat the choice is, what holds it back and what moves it.",
-        footer = {"", "Example:", "  hissledger optimum scenarios/ribbon-bare.json --by equivalentNoiseLevel"})
+        footer = {
+            "",
+            "Example:",
+            "  hissledger optimum scenarios/ribbon-bare.json --by equivalentNoiseLevel --chart ribbon.png"
+        })
 final class OptimumVerb implements Callable<Integer> {
     @Mixin
     private Inputs inputs = new Inputs();
@@ -44,11 +50,15 @@ final class OptimumVerb implements Callable<Integer> {
     @Mixin
     private Outputs outputs = new Outputs();
 
+    @Mixin
+    private ChartFile chart = new ChartFile();
+
     @Spec
     private CommandSpec spec = CommandSpec.create();
 
     @Override
     public Integer call() throws InputException {
+        chart.check(spec);
         Scenario scenario = inputs.read();
         Figure figure = by.isPresent() ? Arguments.figure(spec, by.get()) : Comparison.decidingFigure(scenario);
         List<OptimumText.Searched> searched = new ArrayList<>();
@@ -64,12 +74,23 @@ final class OptimumVerb implements Callable<Integer> {
             throw new InputException(faults);
         }
         searched.sort(Comparator.comparingDouble(each -> each.outcome().best().einVolts()));
+        if (chart.isAsked()) {
+            chart.write(OptimumChart.current(scenario, figure, sweeps(scenario, figure, searched)));
+        }
         outputs.write(
                 spec.commandLine().getOut(),
                 OptimumText.of(scenario, figure, searched),
                 () -> ResultTree.optimum(scenario, figure, searched),
                 () -> Csv.optimum(searched));
         return ExitCode.DONE;
+    }
+
+    private static List<CurrentSweep> sweeps(Scenario scenario, Figure figure, List<OptimumText.Searched> searched) {
+        return searched.stream()
+                .filter(each -> each.outcome().best().amps() > 0.0)
+                .map(each -> CurrentSweep.of(
+                        each.outcome().best(), each.outcome().currentSearch(), scenario.band(), figure.weighting()))
+                .toList();
     }
 
     private static OptimumText.Searched search(Scenario scenario, Candidate candidate, Figure figure) {

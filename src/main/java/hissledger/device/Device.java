@@ -70,6 +70,36 @@ public record Device(
         return parameter(DeviceParameter.CURRENT).map(Parameter::max).orElse(OptionalDouble.empty());
     }
 
+    /** This device with a gain curve, times a factor, for its only one. */
+    public Device with(GainCurve curve, double factor) {
+        GainSheet sheet = currentGain.orElseThrow();
+        List<GainPoint> points = new ArrayList<>();
+        for (GainPoint point : sheet.points()) {
+            double gain = factor * curve.at(point.currentAmps());
+            points.add(new GainPoint(
+                    point.currentAmps(), OptionalDouble.empty(), OptionalDouble.of(gain), OptionalDouble.empty()));
+        }
+        GainSheet only = new GainSheet(points, sheet.basis(), sheet.reference(), sheet.conditions());
+        return new Device(id, kind, polarity, description, evidence, note, Optional.of(only), parameters, noisePoints);
+    }
+
+    /** This device with one value of a stated parameter for its only one, SI. */
+    public Device with(DeviceParameter key, double value) {
+        Parameter stated = parameter(key).orElseThrow();
+        Map<DeviceParameter, Parameter> changed = inOrder();
+        changed.put(
+                key,
+                new Parameter(
+                        OptionalDouble.empty(),
+                        OptionalDouble.of(value),
+                        OptionalDouble.empty(),
+                        stated.basis(),
+                        stated.reference(),
+                        stated.conditions(),
+                        stated.at()));
+        return new Device(id, kind, polarity, description, evidence, note, currentGain, changed, noisePoints);
+    }
+
     /** Whether the sheet states flicker noise, so that densities fall with frequency. */
     public boolean noiseFallsWithFrequency() {
         return parameters.containsKey(DeviceParameter.BASE_FLICKER_CORNER)

@@ -2,6 +2,7 @@ package hissledger.device;
 
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.function.Function;
 
 /**
  * The current gain of a bipolar transistor as its sheet states it.
@@ -37,33 +38,31 @@ public record GainSheet(List<GainPoint> points, Basis basis, String reference, S
         return GainCurve.through(currents(), gain);
     }
 
-    /** The curve of least gain: min where stated, else the typical curve's value. */
+    /** The curve of least gain: min where stated, else the typical value scaled as at the nearest point with a min. */
     public GainCurve least() {
-        double[] gain = new double[points.size()];
-        for (int k = 0; k < gain.length; k++) {
-            gain[k] = points.get(k).min().orElse(typicalAt(points.get(k)));
-        }
-        return GainCurve.through(currents(), gain);
+        return bounded(GainPoint::min);
     }
 
     /** The curve of greatest gain: max where stated, else the typical value scaled as at the nearest point with a max. */
     public GainCurve greatest() {
+        return bounded(GainPoint::max);
+    }
+
+    private GainCurve bounded(Function<GainPoint, OptionalDouble> bound) {
         double[] gain = new double[points.size()];
         for (int k = 0; k < gain.length; k++) {
             GainPoint point = points.get(k);
-            double typical = typicalAt(point);
-            gain[k] = point.max().orElseGet(() -> {
-                double ratio = 1.0;
-                double nearest = Double.POSITIVE_INFINITY;
-                for (GainPoint other : points) {
-                    double distance = Math.abs(Math.log(other.currentAmps() / point.currentAmps()));
-                    if (other.max().isPresent() && distance < nearest) {
-                        nearest = distance;
-                        ratio = other.max().getAsDouble() / typicalAt(other);
-                    }
+            double ratio = 1.0;
+            double nearest = Double.POSITIVE_INFINITY;
+            for (GainPoint other : points) {
+                double distance = Math.abs(Math.log(other.currentAmps() / point.currentAmps()));
+                OptionalDouble stated = bound.apply(other);
+                if (stated.isPresent() && distance < nearest) {
+                    nearest = distance;
+                    ratio = stated.getAsDouble() / typicalAt(other);
                 }
-                return typical * ratio;
-            });
+            }
+            gain[k] = bound.apply(point).orElse(typicalAt(point) * ratio);
         }
         return GainCurve.through(currents(), gain);
     }
