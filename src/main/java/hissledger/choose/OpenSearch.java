@@ -222,9 +222,10 @@ public final class OpenSearch {
         Design design = counted;
         Map<OpenValue, Double> values = new LinkedHashMap<>(fixed);
         for (int d = 0; d < logarithms.length; d++) {
-            double value = Math.exp(logarithms[d]);
-            design = design.with(continuous.get(d), value);
-            values.put(continuous.get(d), value);
+            OpenValue open = continuous.get(d);
+            double value = Math.max(open.from(), Math.min(open.to(), Math.exp(logarithms[d])));
+            design = design.with(open, value);
+            values.put(open, value);
         }
         return settled(design, values);
     }
@@ -347,11 +348,9 @@ public final class OpenSearch {
         double at = Math.log(best.values().getOrDefault(open, open.from()));
         double low = edge(best, open, at, Math.log(open.from()));
         double high = edge(best, open, at, Math.log(open.to()));
-        return new Zone(
-                Math.exp(low),
-                Math.exp(high),
-                low <= Math.log(open.from()) + EDGE_STEP,
-                high >= Math.log(open.to()) - EDGE_STEP);
+        boolean atFrom = low <= Math.log(open.from()) + EDGE_STEP;
+        boolean atTo = high >= Math.log(open.to()) - EDGE_STEP;
+        return new Zone(atFrom ? open.from() : Math.exp(low), atTo ? open.to() : Math.exp(high), atFrom, atTo);
     }
 
     private double edge(Choice best, OpenValue open, double at, double end) {

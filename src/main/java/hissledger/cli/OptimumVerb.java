@@ -22,6 +22,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 
 /** The choice of everything that a scenario leaves open. */
@@ -75,7 +76,13 @@ final class OptimumVerb implements Callable<Integer> {
         }
         searched.sort(Comparator.comparingDouble(each -> each.outcome().best().einVolts()));
         if (chart.isAsked()) {
-            chart.write(OptimumChart.current(scenario, figure, sweeps(scenario, figure, searched)));
+            List<CurrentSweep> sweeps = sweeps(scenario, figure, searched);
+            if (sweeps.isEmpty()) {
+                throw new ParameterException(
+                        spec.commandLine(),
+                        "--chart draws a figure against current, and no candidate has one: all are behavioural amplifiers");
+            }
+            chart.write(OptimumChart.current(scenario, figure, sweeps));
         }
         outputs.write(
                 spec.commandLine().getOut(),

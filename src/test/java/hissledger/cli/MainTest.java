@@ -154,6 +154,26 @@ class MainTest {
     }
 
     @Test
+    void aSearchIsDrawnWhereThereIsACurrent() throws java.io.IOException {
+        Path picture = folder.resolve("search.png");
+        assertThat(run("optimum", VOCAL, "--chart", picture.toString()).err()).isEmpty();
+        assertThat(Files.readAllBytes(picture)).startsWith(0x89, 'P', 'N', 'G');
+        String amplifier = file(
+                "amplifier.json",
+                "{ \"title\": \"One amplifier\", \"source\": { \"kind\": \"resistor\", \"resistance\": \"150 ohm\" },"
+                        + " \"band\": { \"from\": \"20 Hz\", \"to\": \"20 kHz\" }, \"candidates\": [ { \"name\": \"only\","
+                        + " \"device\": \"demo-amplifier-jfet-input\", \"arrangement\": \"amplifier\" } ] }");
+        Path none = folder.resolve("none.png");
+        Outcome refused = run("optimum", amplifier, "--chart", none.toString());
+        assertThat(refused.exit()).isEqualTo(2);
+        assertThat(refused.err()).contains("no candidate has one: all are behavioural amplifiers");
+        assertThat(none).doesNotExist();
+        Outcome text = run("optimum", amplifier);
+        assertThat(text.exit()).isZero();
+        assertThat(text.out()).contains("only", "demo-amplifier-jfet-input");
+    }
+
+    @Test
     void openValuesThatNameNothingOrLeaveNothing() throws java.io.IOException {
         String shipped = Files.readString(SCENARIOS.resolve("ribbon-bare.json"));
         String unnamed = file(
