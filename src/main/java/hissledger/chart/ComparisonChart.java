@@ -14,7 +14,6 @@ import hissledger.files.Quantities;
 import hissledger.ledger.Figure;
 import hissledger.ledger.NoiseSpectrum;
 import hissledger.physics.Decibels;
-import hissledger.physics.Weighting;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
@@ -140,7 +139,10 @@ public final class ComparisonChart {
                 scenario.title(),
                 resistanceConditions(comparison, sweeps),
                 new Scale("source resistance, Ω", Scale.Kind.LOGARITHMIC_PREFIXED, span.fromOhms, span.toOhms),
-                levelScale("equivalent input noise, " + weighting(comparison.figure()) + ", dBu", traces),
+                levelScale(
+                        "equivalent input noise, "
+                                + Phrases.weighting(comparison.figure().weighting()) + ", dBu",
+                        traces),
                 traces,
                 places);
     }
@@ -158,8 +160,9 @@ public final class ComparisonChart {
                 + ". " + surroundings(scenario));
         boolean searched =
                 sweeps.stream().anyMatch(sweep -> sweep.evaluation().optimum().isPresent());
-        conditions.add("EIN over " + Phrases.band(scenario.band()) + ", " + weighting(comparison.figure()) + ", "
-                + REFERENCE + "." + (searched ? " Best currents are found anew at each resistance." : ""));
+        conditions.add("EIN over " + Phrases.band(scenario.band()) + ", "
+                + Phrases.weighting(comparison.figure().weighting()) + ", " + REFERENCE + "."
+                + (searched ? " Best currents are found anew at each resistance." : ""));
         comparison.crossover().map(ComparisonChart::crossing).ifPresent(conditions::add);
         return conditions;
     }
@@ -315,15 +318,6 @@ public final class ComparisonChart {
 
     private static String surroundings(Scenario scenario) {
         return "Path and stage at " + Phrases.temperature(scenario.temperatureKelvin()) + ".";
-    }
-
-    private static String weighting(Figure figure) {
-        Weighting weighting = figure.weighting();
-        return switch (weighting) {
-            case FLAT -> "unweighted";
-            case A -> "A-weighted";
-            case ITU_468, PLAYBACK, PLAYBACK_A -> weighting.label();
-        };
     }
 
     private static Scale logarithmic(String title, List<Trace> traces) {

@@ -3,11 +3,12 @@ package hissledger.chart;
 import hissledger.choose.BestCurrent;
 import hissledger.choose.CurrentSweep;
 import hissledger.choose.Design;
+import hissledger.choose.OpenSearch;
+import hissledger.choose.OpenValue;
 import hissledger.choose.Scenario;
 import hissledger.files.Phrases;
 import hissledger.ledger.Figure;
 import hissledger.physics.Decibels;
-import hissledger.physics.Weighting;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -47,27 +48,15 @@ public final class OptimumChart {
             }
             int number = number(scenario, sweep.choice().design());
             Design design = sweep.choice().design();
-            int count = design.deviceCount();
-            String id = design.candidate().device().id();
             lines.add(new Trace(
-                    Trace.Role.CANDIDATE,
-                    number,
-                    design.candidate().name(),
-                    (count == 1 ? id : id + " x" + count) + ", chosen "
-                            + Phrases.value(sweep.choice().amps(), "A"),
-                    amps,
-                    levels));
+                    Trace.Role.CANDIDATE, number, design.candidate().name(), chosen(sweep.choice()), amps, levels));
             shades.add(new Shade(number, amps, levels(sweep.leastVolts()), levels(sweep.greatestVolts())));
             sweep.flat().ifPresent(flat -> zone(amps, levels, flat, number).forEach(zones::add));
         }
         List<Trace> traces = new ArrayList<>(lines);
         traces.addAll(zones);
         double top = Math.min(greatest + ROOM_DECIBELS, least + MOST_DECIBELS);
-        String weighting = figure.weighting() == Weighting.FLAT
-                ? "unweighted"
-                : figure.weighting() == Weighting.A
-                        ? "A-weighted"
-                        : figure.weighting().label();
+        String weighting = Phrases.weighting(figure.weighting());
         return new Plate(
                 scenario.title(),
                 List.of(
@@ -98,6 +87,23 @@ public final class OptimumChart {
             }
         }
         return x.size() < 2 ? List.of() : List.of(new Trace(Trace.Role.ZONE, number, "", "", x, y));
+    }
+
+    /** What the search settled on: devices, current and open values. */
+    private static String chosen(OpenSearch.Choice choice) {
+        int count = choice.design().deviceCount();
+        StringBuilder words =
+                new StringBuilder(choice.design().candidate().device().id());
+        words.append(count == 1 ? "" : " x" + count)
+                .append(", ")
+                .append(Phrases.value(choice.amps(), "A"))
+                .append(count == 1 ? "" : " each");
+        choice.values().forEach((open, value) -> {
+            if (!(open instanceof OpenValue.Count)) {
+                words.append(", ").append(open.name()).append(' ').append(Phrases.chosen(open, value));
+            }
+        });
+        return words.toString();
     }
 
     private static int number(Scenario scenario, Design design) {

@@ -1,5 +1,6 @@
 package hissledger.files;
 
+import hissledger.choose.OpenValue;
 import hissledger.circuit.CapacitorSource;
 import hissledger.circuit.CoilSource;
 import hissledger.circuit.ResistorSource;
@@ -7,6 +8,7 @@ import hissledger.circuit.Source;
 import hissledger.circuit.TableSource;
 import hissledger.physics.Band;
 import hissledger.physics.Constants;
+import hissledger.physics.Weighting;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -41,6 +43,23 @@ public final class Phrases {
     /** A band. */
     public static String band(Band band) {
         return brief(band.fromHertz(), "Hz") + " to " + brief(band.toHertz(), "Hz");
+    }
+
+    /** A weighting as it stands beside a figure. */
+    public static String weighting(Weighting weighting) {
+        return switch (weighting) {
+            case FLAT -> "unweighted";
+            case A -> "A-weighted";
+            case ITU_468, PLAYBACK, PLAYBACK_A -> weighting.label();
+        };
+    }
+
+    /** A value that a search has chosen: a count, a turns ratio or ohms. */
+    public static String chosen(OpenValue open, double value) {
+        if (open instanceof OpenValue.Count) {
+            return String.format(Locale.ROOT, "%.0f", value);
+        }
+        return open instanceof OpenValue.Ratio ? String.format(Locale.ROOT, "1:%.1f", value) : value(value, "Ω");
     }
 
     /** A source with its values and temperature. */

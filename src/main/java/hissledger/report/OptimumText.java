@@ -4,7 +4,6 @@ import hissledger.choose.BestCurrent;
 import hissledger.choose.Candidate;
 import hissledger.choose.Limits;
 import hissledger.choose.OpenSearch;
-import hissledger.choose.OpenValue;
 import hissledger.choose.Scenario;
 import hissledger.choose.Sensitivity;
 import hissledger.files.Phrases;
@@ -82,7 +81,7 @@ public final class OptimumText {
             int count = best.design().deviceCount();
             String id = each.candidate().device().id();
             List<String> chosen = new ArrayList<>();
-            best.values().forEach((open, value) -> chosen.add(open.name() + " " + value(open, value)));
+            best.values().forEach((open, value) -> chosen.add(open.name() + " " + Phrases.chosen(open, value)));
             table.row(
                     each.candidate().name(),
                     count == 1 ? id : id + " x" + count,
@@ -102,8 +101,9 @@ public final class OptimumText {
         outcome.zones()
                 .forEach((open, zone) -> line(
                         text,
-                        open.name() + ": within 0.1 dB from " + value(open, zone.from())
-                                + (zone.heldBelow() ? " (end of its range)" : "") + " to " + value(open, zone.to())
+                        open.name() + ": within 0.1 dB from " + Phrases.chosen(open, zone.from())
+                                + (zone.heldBelow() ? " (end of its range)" : "") + " to "
+                                + Phrases.chosen(open, zone.to())
                                 + (zone.heldAbove() ? " (end of its range)" : "")
                                 + ", the current at its best for each."));
         if (outcome.byCount().size() > 1) {
@@ -155,13 +155,6 @@ public final class OptimumText {
                     .append(Words.value(closedForm.getAsDouble(), "A"));
         }
         return sentence.append('.').toString();
-    }
-
-    private static String value(OpenValue open, double value) {
-        if (open instanceof OpenValue.Count) {
-            return String.format(Locale.ROOT, "%.0f", value);
-        }
-        return open instanceof OpenValue.Ratio ? String.format(Locale.ROOT, "1:%.1f", value) : Words.value(value, "Ω");
     }
 
     private static void line(StringBuilder text, String sentence) {
