@@ -159,9 +159,13 @@ public final class CompareText {
         Evaluation winner = comparison.winner();
         String figure = comparison.figure().words();
         if (comparison.leadDecibels().isPresent()) {
-            sentences.add("Quietest: " + quoted(winner) + ", by "
-                    + Words.decibels(comparison.leadDecibels()) + " dB over "
-                    + quoted(comparison.ranked().get(1)) + " (" + figure + ").");
+            double lead = comparison.leadDecibels().getAsDouble();
+            String runnerUp = quoted(comparison.ranked().get(1));
+            sentences.add("Quietest: " + quoted(winner) + ", "
+                    + (Words.isLevel(lead)
+                            ? "level with " + runnerUp + " within 0.01 dB"
+                            : "by " + Words.decibels(lead) + " dB over " + runnerUp)
+                    + " (" + figure + ").");
         } else {
             sentences.add("One candidate: " + quoted(winner) + ".");
         }

@@ -118,9 +118,9 @@ public final class OptimumText {
                     .ifPresent(second -> line(
                             text,
                             "Runner-up: " + second.design().candidate().plan().inParallel() + " in parallel, "
-                                    + Words.decibels(Decibels.ofAmplitudeRatio(
+                                    + worse(Decibels.ofAmplitudeRatio(
                                             second.einVolts() / outcome.best().einVolts()))
-                                    + " dB worse."));
+                                    + "."));
         }
         if (!each.sensitivities().isEmpty()) {
             line(text, "What moves it (change of EIN in dB):");
@@ -155,6 +155,10 @@ public final class OptimumText {
                     .append(Words.value(closedForm.getAsDouble(), "A"));
         }
         return sentence.append('.').toString();
+    }
+
+    private static String worse(double decibels) {
+        return Words.isLevel(decibels) ? "level within 0.01 dB" : Words.decibels(decibels) + " dB worse";
     }
 
     private static void line(StringBuilder text, String sentence) {

@@ -19,6 +19,9 @@ final class Words {
     /** Sentences are broken to this width. */
     private static final int LINE_WIDTH = 110;
 
+    /** Half of the last decimal of a printed level, dB. */
+    private static final double LEVEL_DECIBELS = 0.005;
+
     private Words() {}
 
     /** A physical value in engineering notation. */
@@ -34,6 +37,11 @@ final class Words {
     /** A level or ratio with two decimals, or the words for one that has no meaning. */
     static String decibels(OptionalDouble decibels) {
         return decibels.isPresent() ? decibels(decibels.getAsDouble()) : NOT_DEFINED;
+    }
+
+    /** Whether a difference vanishes in the decimals that are printed. */
+    static boolean isLevel(double decibels) {
+        return Math.abs(decibels) < LEVEL_DECIBELS;
     }
 
     /** A voltage as a level in dBu. */

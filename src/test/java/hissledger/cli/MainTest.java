@@ -49,6 +49,12 @@ class MainTest {
     }
 
     @Test
+    void candidatesThatDifferInNoPrintedDigitAreLevel() {
+        assertThat(run("compare", SCENARIOS.resolve("geophone.json").toString()).out())
+                .contains("Quietest: \"PNP pair\", level with \"PNP pair at 2 mA\" within 0.01 dB (EIN flat).");
+    }
+
+    @Test
     void ledgerPrintsEveryEntryAndItsTotal() {
         Outcome outcome = run("ledger", VOCAL, "--candidate", "PNP switch", "--full");
         assertThat(outcome.exit()).isZero();
