@@ -29,4 +29,9 @@ public record CurrentRange(double fromAmps, String fromReason, double toAmps, St
     public CurrentRange atMost(double amps, String reason) {
         return amps < toAmps ? new CurrentRange(fromAmps, fromReason, amps, reason) : this;
     }
+
+    /** The nearest current of this range, A. */
+    public double clamp(double amps) {
+        return Math.max(fromAmps, Math.min(toAmps, amps));
+    }
 }

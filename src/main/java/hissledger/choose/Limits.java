@@ -17,6 +17,59 @@ public record Limits(
         OptionalDouble powerWatts,
         OptionalDouble headroomVolts,
         OptionalDouble inputFarads) {
+    /** What a limit is set on; in the order in which a scenario names them. */
+    public enum Kind {
+        TOTAL_CURRENT("limits.totalCurrent", "A", false),
+        POWER("limits.power", "W", false),
+        HEADROOM("limits.headroom", "V", true),
+        INPUT_CAPACITANCE("limits.inputCapacitance", "F", false);
+
+        private final String path;
+        private final String unit;
+        private final boolean least;
+
+        Kind(String path, String unit, boolean least) {
+            this.path = path;
+            this.unit = unit;
+            this.least = least;
+        }
+
+        /** Its dotted path in a scenario. */
+        public String path() {
+            return path;
+        }
+
+        /** Symbol of its unit. */
+        public String unit() {
+            return unit;
+        }
+
+        /** Whether it is the least accepted value, not the greatest. */
+        public boolean isLeast() {
+            return least;
+        }
+    }
+
+    /** The limit of a kind in its unit; empty where none is set. */
+    public OptionalDouble of(Kind kind) {
+        return switch (kind) {
+            case TOTAL_CURRENT -> totalAmps;
+            case POWER -> powerWatts;
+            case HEADROOM -> headroomVolts;
+            case INPUT_CAPACITANCE -> inputFarads;
+        };
+    }
+
+    /** These limits with one of them set or, where {@code value} is empty, dropped. */
+    public Limits with(Kind kind, OptionalDouble value) {
+        return switch (kind) {
+            case TOTAL_CURRENT -> new Limits(value, supplyVolts, powerWatts, headroomVolts, inputFarads);
+            case POWER -> new Limits(totalAmps, supplyVolts, value, headroomVolts, inputFarads);
+            case HEADROOM -> new Limits(totalAmps, supplyVolts, powerWatts, value, inputFarads);
+            case INPUT_CAPACITANCE -> new Limits(totalAmps, supplyVolts, powerWatts, headroomVolts, value);
+        };
+    }
+
     /** No limit. */
     public static Limits none() {
         OptionalDouble free = OptionalDouble.empty();

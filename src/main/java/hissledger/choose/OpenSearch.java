@@ -16,8 +16,12 @@ import hissledger.physics.Thermal;
 import hissledger.physics.Weighting;
 import hissledger.twoport.ChainPass;
 import hissledger.twoport.Frequencies;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -42,6 +46,13 @@ public final class OpenSearch {
     private static final double EDGE_STEP = 1e-3;
     private static final int CURRENTS_PER_DECADE = 8;
 
+    /** A limit is not relaxed by more than this many factors of two. */
+    private static final double MOST_OCTAVES = 64.0;
+
+    private static final double OCTAVE_STEP = 0.005;
+    /** Digits of a relaxed limit. */
+    private static final int DIGITS = 3;
+
     private final Design start;
     private final Limits limits;
     private final Band band;
@@ -61,6 +72,16 @@ public final class OpenSearch {
                 .filter(OpenValue.Count.class::isInstance)
                 .map(OpenValue.Count.class::cast)
                 .findFirst();
+    }
+
+    /** The same search under other limits. */
+    private OpenSearch(OpenSearch other, Limits limits) {
+        this.start = other.start;
+        this.limits = limits;
+        this.band = other.band;
+        this.weighting = other.weighting;
+        this.continuous = other.continuous;
+        this.count = other.count;
     }
 
     /**
@@ -109,23 +130,19 @@ public final class OpenSearch {
     /**
      * Searches a candidate's open values.
      *
-     * @throws IllegalArgumentException where the limits leave no design at all; the message says which
+     * @throws ImpossibleLimitsException where the limits leave no design at all; it says what would help
      */
     public static Outcome of(Scenario scenario, Candidate candidate, Weighting weighting) {
         return new OpenSearch(scenario, candidate, weighting).search();
     }
 
     private Outcome search() {
-        int least = count.map(OpenValue.Count::least)
-                .orElse(start.candidate().plan().inParallel());
-        int greatest = count.map(OpenValue.Count::greatest).orElse(least);
-        List<Choice> byCount = IntStream.rangeClosed(least, greatest)
-                .parallel()
+        List<Choice> byCount = counts().parallel()
                 .mapToObj(this::ofCount)
                 .flatMap(Optional::stream)
                 .toList();
         if (byCount.isEmpty()) {
-            throw new IllegalArgumentException(refusal());
+            throw refusal();
         }
         Choice best = byCount.stream()
                 .min(Comparator.comparingDouble(Choice::einVolts))
@@ -138,10 +155,80 @@ public final class OpenSearch {
         return new Outcome(best, current, zones, byCount);
     }
 
-    private String refusal() {
-        return "no choice of its open values respects the limits of the scenario ("
-                + (limits.mostAmps() < Double.POSITIVE_INFINITY ? "at most " + limits.mostAmps() + " A in all; " : "")
-                + "try a lower headroom, a greater input capacitance or more current)";
+    private ImpossibleLimitsException refusal() {
+        Map<Limits.Kind, Optional<Double>> relief = new EnumMap<>(Limits.Kind.class);
+        for (Limits.Kind kind : Limits.Kind.values()) {
+            limits.of(kind).ifPresent(stated -> relief.put(kind, relaxed(kind, stated)));
+        }
+        return new ImpossibleLimitsException(relief);
+    }
+
+    /** The strictest value of one limit that leaves a choice while the others stay, to three digits; empty where none does. */
+    private Optional<Double> relaxed(Limits.Kind kind, double stated) {
+        if (!new OpenSearch(this, limits.with(kind, OptionalDouble.empty())).isPossible()) {
+            return Optional.empty();
+        }
+        double bad = 0.0;
+        double good = 1.0;
+        while (!isPossibleAt(kind, relaxedBy(good, kind, stated))) {
+            bad = good;
+            good *= 2.0;
+            if (good > MOST_OCTAVES) {
+                return Optional.empty();
+            }
+        }
+        while (good - bad > OCTAVE_STEP) {
+            double middle = 0.5 * (good + bad);
+            if (isPossibleAt(kind, relaxedBy(middle, kind, stated))) {
+                good = middle;
+            } else {
+                bad = middle;
+            }
+        }
+        RoundingMode outward = kind.isLeast() ? RoundingMode.FLOOR : RoundingMode.CEILING;
+        return Optional.of(BigDecimal.valueOf(relaxedBy(good, kind, stated))
+                .round(new MathContext(DIGITS, outward))
+                .doubleValue());
+    }
+
+    private static double relaxedBy(double octaves, Limits.Kind kind, double stated) {
+        return stated * Math.pow(2.0, kind.isLeast() ? -octaves : octaves);
+    }
+
+    private boolean isPossibleAt(Limits.Kind kind, double value) {
+        return new OpenSearch(this, limits.with(kind, OptionalDouble.of(value))).isPossible();
+    }
+
+    /** Whether any choice that the search tries respects the limits. */
+    private boolean isPossible() {
+        return counts().parallel().anyMatch(devices -> {
+            Design counted = count.isPresent() ? start.with(count.get(), devices) : start;
+            return grid().stream().anyMatch(point -> {
+                Design design = counted;
+                for (int d = 0; d < point.length; d++) {
+                    design = design.with(continuous.get(d), Math.exp(clamp(continuous.get(d), point[d])));
+                }
+                return design.candidate().current() instanceof CurrentChoice.Optimum
+                        ? limited(design).isPresent()
+                        : allowedAsGiven(design);
+            });
+        });
+    }
+
+    private IntStream counts() {
+        int stated = start.candidate().plan().inParallel();
+        return IntStream.rangeClosed(
+                count.map(OpenValue.Count::least).orElse(stated),
+                count.map(OpenValue.Count::greatest).orElse(stated));
+    }
+
+    private static double givenAmps(Design design) {
+        return design.candidate().current() instanceof CurrentChoice.Given given ? given.amps() : 0.0;
+    }
+
+    private boolean allowedAsGiven(Design design) {
+        double amps = givenAmps(design);
+        return amps * design.deviceCount() <= limits.mostAmps() && allowed(design.at(amps));
     }
 
     private Optional<Choice> ofCount(int devices) {
@@ -232,20 +319,14 @@ public final class OpenSearch {
 
     /** A design at its best current, or at the given one where that respects the limits. */
     private Optional<Choice> settled(Design design, Map<OpenValue, Double> values) {
-        CurrentChoice asked = design.candidate().current();
-        double amps = 0.0;
-        if (asked instanceof CurrentChoice.Given given) {
-            amps = given.amps();
-            if (amps * design.deviceCount() > limits.mostAmps() || !allowed(design.at(amps))) {
-                return Optional.empty();
-            }
-        } else if (asked instanceof CurrentChoice.Optimum) {
+        double amps = givenAmps(design);
+        if (design.candidate().current() instanceof CurrentChoice.Optimum) {
             Optional<Design> limited = limited(design);
             if (limited.isEmpty()) {
                 return Optional.empty();
             }
             amps = BestCurrent.of(limited.get(), band, weighting).amps();
-        } else if (!allowed(design.at(amps))) {
+        } else if (!allowedAsGiven(design)) {
             return Optional.empty();
         }
         FrontEnd frontEnd = design.at(amps);
@@ -289,16 +370,21 @@ public final class OpenSearch {
             return Optional.empty();
         }
         double step = (to - from) / (points - 1);
-        double low = bestFirst == 0 ? from : boundary(capped, from + bestFirst * step, -step);
-        double high = bestLast == points - 1 ? to : boundary(capped, from + bestLast * step, step);
+        CurrentRange range = capped.range();
+        double low = bestFirst == 0
+                ? range.fromAmps()
+                : range.clamp(Math.exp(boundary(capped, from + bestFirst * step, -step)));
+        double high = bestLast == points - 1
+                ? range.toAmps()
+                : range.clamp(Math.exp(boundary(capped, from + bestLast * step, step)));
         String reason = "headroom or input capacitance limit of the scenario";
-        Design cut = capped.atMost(Math.exp(high), reason);
+        Design cut = capped.atMost(high, reason);
         return Optional.of(new Design(
                 cut.candidate(),
                 cut.source(),
                 cut.path(),
                 cut.stage(),
-                cut.range().atLeast(Math.exp(low), reason),
+                cut.range().atLeast(low, reason),
                 cut.defaultsUsed(),
                 cut.kelvin()));
     }

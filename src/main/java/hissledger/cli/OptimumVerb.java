@@ -4,6 +4,7 @@ import hissledger.chart.OptimumChart;
 import hissledger.choose.Candidate;
 import hissledger.choose.Comparison;
 import hissledger.choose.CurrentSweep;
+import hissledger.choose.ImpossibleLimitsException;
 import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
 import hissledger.choose.Sensitivity;
@@ -67,6 +68,9 @@ final class OptimumVerb implements Callable<Integer> {
         for (Candidate candidate : scenario.candidates()) {
             try {
                 searched.add(search(scenario, candidate, figure));
+            } catch (ImpossibleLimitsException refused) {
+                faults.add(Fault.of(
+                        inputs.file(), "candidate \"" + candidate.name() + "\": " + OptimumText.refusal(refused)));
             } catch (IllegalArgumentException refused) {
                 faults.add(Fault.of(inputs.file(), "candidate \"" + candidate.name() + "\": " + refused.getMessage()));
             }

@@ -2,6 +2,7 @@ package hissledger.report;
 
 import hissledger.choose.BestCurrent;
 import hissledger.choose.Candidate;
+import hissledger.choose.ImpossibleLimitsException;
 import hissledger.choose.Limits;
 import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
@@ -65,6 +66,22 @@ public final class OptimumText {
                         volts -> parts.add("1 % harmonic not below an EMF of " + Phrases.value(volts, "V") + " rms"));
         limits.inputFarads().ifPresent(farads -> parts.add("input capacitance at most " + Phrases.brief(farads, "F")));
         return parts.isEmpty() ? Optional.empty() : Optional.of("Limits: " + String.join("; ", parts) + ".");
+    }
+
+    /** Why the limits leave a candidate no choice, and what would help. */
+    public static String refusal(ImpossibleLimitsException refused) {
+        List<String> help = new ArrayList<>();
+        List<String> all = new ArrayList<>();
+        refused.relief().forEach((kind, value) -> {
+            all.add(kind.path());
+            value.ifPresent(enough -> help.add(kind.path() + " " + Phrases.value(enough, kind.unit())
+                    + (kind.isLeast() ? " or less" : " or more")));
+        });
+        String wanted = help.isEmpty()
+                ? "relaxing one alone does not help: relax several of " + String.join(", ", all)
+                : "enough would be " + String.join(", or ", help);
+        return "no choice of its open values and current respects " + (all.size() == 1 ? "" : "all of ")
+                + String.join(", ", all) + "; " + wanted;
     }
 
     private static TextTable table(List<Searched> searched) {

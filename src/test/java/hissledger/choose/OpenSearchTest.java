@@ -1,7 +1,7 @@
 package hissledger.choose;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
+import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
 import static org.assertj.core.api.Assertions.within;
 
 import hissledger.circuit.Arrangement;
@@ -204,10 +204,26 @@ class OpenSearchTest {
         assertThat(found.currentSearch().orElseThrow().bound()).contains("current or power limit of the scenario");
 
         Limits impossible = new Limits(FREE, FREE, FREE, OptionalDouble.of(1.0), FREE);
-        assertThatIllegalArgumentException()
+        assertThatExceptionOfType(ImpossibleLimitsException.class)
                 .isThrownBy(() ->
                         OpenSearch.of(scenario(source, List.of(), candidate, impossible), candidate, Weighting.FLAT))
-                .withMessageStartingWith("no choice of its open values respects the limits of the scenario");
+                .satisfies(refused -> {
+                    double enough = refused.relief()
+                            .getOrDefault(Limits.Kind.HEADROOM, Optional.empty())
+                            .orElseThrow();
+                    assertThat(reaches(candidate, source, enough)).isTrue();
+                    assertThat(reaches(candidate, source, enough * 1.02)).isFalse();
+                });
+    }
+
+    private static boolean reaches(Candidate candidate, ResistorSource source, double headroom) {
+        Limits limits = new Limits(FREE, FREE, FREE, OptionalDouble.of(headroom), FREE);
+        try {
+            OpenSearch.of(scenario(source, List.of(), candidate, limits), candidate, Weighting.FLAT);
+            return true;
+        } catch (ImpossibleLimitsException refused) {
+            return false;
+        }
     }
 
     @Test

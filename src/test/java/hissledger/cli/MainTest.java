@@ -195,6 +195,15 @@ class MainTest {
                 shipped.replace("\"candidates\": [", "\"limits\": { \"power\": \"1 mW\" },\n  \"candidates\": ["));
         assertThat(run("optimum", hungry).err())
                 .contains("limits.power needs the voltage it is drawn at; add limits.supply");
+        String loud = file(
+                "loud.json",
+                shipped.replace("\"candidates\": [", "\"limits\": { \"headroom\": \"1 V\" },\n  \"candidates\": ["));
+        Outcome refused = run("optimum", loud);
+        assertThat(refused.exit()).isEqualTo(2);
+        assertThat(refused.err())
+                .containsPattern(
+                        "candidate \"1:20\": no choice of its open values and current respects limits.headroom;"
+                                + " enough would be limits.headroom [0-9.]+ [nuµm]?V or less");
     }
 
     @Test
