@@ -1,5 +1,6 @@
 package hissledger.cli;
 
+import hissledger.choose.ESeries;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import picocli.CommandLine;
@@ -20,6 +21,7 @@ import picocli.CommandLine.Spec;
             LedgerVerb.class,
             CompareVerb.class,
             OptimumVerb.class,
+            BiasVerb.class,
             DevicesVerb.class,
             NewVerb.class,
             SchemaVerb.class
@@ -52,6 +54,7 @@ public final class Main implements Runnable {
         commandLine.registerConverter(FileKind.class, word -> Arguments.word(FileKind.values(), word));
         commandLine.registerConverter(
                 CompareVerb.ChartKind.class, word -> Arguments.word(CompareVerb.ChartKind.values(), word));
+        commandLine.registerConverter(ESeries.class, word -> Arguments.word(BiasVerb.RESISTORS, word));
         commandLine.setParameterExceptionHandler(Faults::usage);
         commandLine.setExecutionExceptionHandler((fault, command, parsed) -> Faults.execution(fault, command));
         int code;

@@ -138,6 +138,26 @@ public final class Quantities {
         return orIllegal(text, Dimension.CONDUCTANCE);
     }
 
+    /** A voltage as written on a command line, V; {@link IllegalArgumentException} says what is wrong. */
+    public static double volts(String text) {
+        return orIllegal(text, Dimension.VOLTAGE);
+    }
+
+    /** A frequency as written on a command line, Hz; {@link IllegalArgumentException} says what is wrong. */
+    public static double hertz(String text) {
+        return orIllegal(text, Dimension.FREQUENCY);
+    }
+
+    /** A ratio in decibels as written on a command line, dB; {@link IllegalArgumentException} says what is wrong. */
+    public static double decibels(String text) {
+        return orIllegal(text, Dimension.DECIBELS);
+    }
+
+    /** A part of the whole as written on a command line, 0.05 for "5 %"; {@link IllegalArgumentException} says what is wrong. */
+    public static double part(String text) {
+        return orIllegal(text, Dimension.PERCENT);
+    }
+
     private static double orIllegal(String text, Dimension dimension) {
         try {
             double value = parse(text, dimension).value();
