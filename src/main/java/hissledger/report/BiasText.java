@@ -4,6 +4,7 @@ import hissledger.choose.BiasDesign;
 import hissledger.choose.BiasNetwork;
 import hissledger.choose.OperatingPoint;
 import hissledger.device.DeviceKind;
+import hissledger.device.Polarity;
 import hissledger.files.Phrases;
 import hissledger.physics.Decibels;
 import java.util.ArrayList;
@@ -27,14 +28,16 @@ public final class BiasText {
         StringBuilder text = new StringBuilder();
         text.append(outcome.scenario().title()).append('\n');
         Words.conditions(outcome.scenario()).forEach(line -> text.append(line).append('\n'));
+        int count = outcome.stated().plan().inParallel();
+        text.append('\n');
         line(
                 text,
                 String.format(
                         Locale.ROOT,
-                        "[%s] %s x%d, %s, wanted %s each, from %s; resistors %s, %s %% each, headroom at least %s peak.",
+                        "[%s] %s%s, %s, wanted %s each, from %s; resistors %s, %s %% each, headroom at least %s peak.",
                         outcome.stated().name(),
                         outcome.stated().device().id(),
-                        outcome.stated().plan().inParallel(),
+                        count == 1 ? "" : " x" + count,
                         outcome.stated().plan().arrangement().label(),
                         Words.value(outcome.wantedAmps(), "A"),
                         Phrases.brief(outcome.request().supplyVolts(), "V"),
@@ -89,6 +92,12 @@ public final class BiasText {
 
     private static List<String> assumptions(BiasDesign.Outcome outcome) {
         List<String> list = new ArrayList<>();
+        Polarity polarity = outcome.stated().device().polarity();
+        if (polarity == Polarity.PNP || polarity == Polarity.P_CHANNEL) {
+            list.add("Voltages are magnitudes, and the parts are named for a supply of the device's polarity ("
+                    + polarity.label()
+                    + ": negative). From a positive supply exchange supply and ground in the names of all parts.");
+        }
         list.add("Worst cases: 0 °C to 50 °C, tolerances and the device's bounds together.");
         if (isBipolar(outcome)) {
             list.add("Assumed (common practice, no source): VBE 0.65 V at 1 mA and 25 °C, -2 mV/K; saturation at VCE ="
