@@ -209,7 +209,8 @@ public final class BiasDesign {
             if (amps > least) {
                 throw new IllegalArgumentException(String.format(
                         Locale.ROOT,
-                        "a current of %.4g mA is above the least IDSS of %s, %.4g mA; not every one would carry it",
+                        "a current of %.3g mA is above the least IDSS of %s, %.3g mA, and not every one would carry it;"
+                                + " state less current, more devices in parallel or another device",
                         1e3 * amps,
                         design.candidate().device().id(),
                         1e3 * least));
