@@ -110,7 +110,7 @@ final class Look {
     /** The colour of a trace. */
     static Color colour(Trace.Role role, int number) {
         return switch (role) {
-            case CANDIDATE, POINTS, ZONE -> COLOURS.get(number % COLOURS.size());
+            case CANDIDATE, POINTS, ZONE, REGION -> COLOURS.get(number % COLOURS.size());
             case FLOOR -> INK;
             case LIMIT -> RULE;
         };
@@ -120,7 +120,7 @@ final class Look {
     static BasicStroke stroke(Trace.Role role, int number, double scale) {
         return switch (role) {
             case ZONE -> stroke(ZONE_LINE, new float[0], scale);
-            case CANDIDATE, POINTS -> stroke(LINE, DASHES[number % DASHES.length], scale);
+            case CANDIDATE, POINTS, REGION -> stroke(LINE, DASHES[number % DASHES.length], scale);
             case FLOOR -> stroke(FLOOR_LINE, FLOOR_DASH, scale);
             case LIMIT -> stroke(LIMIT_LINE, LIMIT_DASH, scale);
         };

@@ -32,6 +32,7 @@ final class PlateDrawing {
     private static final double MARGIN = 30.0;
     private static final double TITLE = 30.0;
     private static final double TEXT = 19.0;
+    private static final double VALUE = 16.5;
     private static final double RULE_GAP = 5.0;
     private static final double SPACE = 12.0;
     private static final double LEADER = 46.0;
@@ -119,6 +120,7 @@ final class PlateDrawing {
         graphics.setPaint(Look.INK);
         across.draw(graphics, field.getMaxX() - across.width(), bottom);
         drawPlaces(plot, field, placesTop);
+        drawMapLabels(plot, field);
         drawNames(names, plot, field, headingBottom, namesBottom);
     }
 
@@ -226,6 +228,11 @@ final class PlateDrawing {
             double middle = middles[k];
             double nameTop = middle - name.height() / 2.0;
             double sampleY = nameTop + name.name().lineHeight() / 2.0;
+            if (trace.role() == Trace.Role.REGION) {
+                drawSwatch(sample, nameTop, name.name().lineHeight(), trace.number());
+                drawName(name, textStart, nameTop);
+                continue;
+            }
             graphics.setPaint(colour);
             graphics.setStroke(Look.plain(HAIR, scale));
             graphics.draw(new Line2D.Double(start + 3.0 * scale, ends[k], sample - 3.0 * scale, sampleY));
@@ -239,11 +246,41 @@ final class PlateDrawing {
                 moved.fill(Look.marker(trace.number(), scale));
                 moved.dispose();
             }
-            graphics.setPaint(Look.INK);
-            name.name().draw(graphics, textStart, nameTop);
-            graphics.setPaint(Look.PALE_INK);
-            name.detail().draw(graphics, textStart, nameTop + name.name().height());
+            drawName(name, textStart, nameTop);
         }
+    }
+
+    private void drawName(Name name, double x, double top) {
+        graphics.setPaint(Look.INK);
+        name.name().draw(graphics, x, top);
+        graphics.setPaint(Look.PALE_INK);
+        name.detail().draw(graphics, x, top + name.name().height());
+    }
+
+    /** A piece of the hatching of a region beside its name. */
+    private void drawSwatch(double x, double top, double height, int number) {
+        Rectangle2D swatch = new Rectangle2D.Double(x, top, SAMPLE * scale, height);
+        MapShade.hatch(graphics, swatch, number, scale);
+        graphics.setPaint(Look.INK);
+        graphics.setStroke(Look.plain(HAIR, scale));
+        graphics.draw(swatch);
+    }
+
+    /** Names in regions and values on lines, clear of the rings of places. */
+    private void drawMapLabels(XYPlot plot, Rectangle2D field) {
+        List<Rectangle2D> taken = new ArrayList<>();
+        double ring = RING * scale;
+        for (Place place : plate.places()) {
+            place.y()
+                    .ifPresent(y -> taken.add(new Rectangle2D.Double(
+                            plot.getDomainAxis().valueToJava2D(place.x(), field, RectangleEdge.BOTTOM) - ring,
+                            plot.getRangeAxis().valueToJava2D(y, field, RectangleEdge.LEFT) - ring,
+                            2.0 * ring,
+                            2.0 * ring)));
+        }
+        MapLabels labels = new MapLabels(graphics, plot, field, scale, taken);
+        plate.regions().forEach(region -> labels.name(region, TEXT * scale));
+        plate.isolines().forEach(isoline -> labels.value(isoline, VALUE * scale));
     }
 
     /** The names of places above the field, moved apart, each with a stroke to its line. */
@@ -298,6 +335,9 @@ final class PlateDrawing {
             renderer.setSeriesPaint(k, Look.colour(trace.role(), trace.number()));
             renderer.setSeriesStroke(k, Look.stroke(trace.role(), trace.number(), scale));
             renderer.setSeriesShape(k, Look.marker(trace.number(), scale));
+        }
+        if (!plate.regions().isEmpty() || !plate.isolines().isEmpty()) {
+            renderer.addAnnotation(new MapShade(plate, scale), Layer.BACKGROUND);
         }
         plate.shades().forEach(shade -> renderer.addAnnotation(new BandShade(shade), Layer.BACKGROUND));
         floor(plate).ifPresent(trace -> renderer.addAnnotation(new FloorShade(trace), Layer.BACKGROUND));

@@ -40,7 +40,8 @@ final class SparseMarkers extends XYLineAndShapeRenderer {
 
     @Override
     public boolean getItemLineVisible(int series, int item) {
-        return traces.get(series).role() != Trace.Role.POINTS;
+        Trace.Role role = traces.get(series).role();
+        return role != Trace.Role.POINTS && role != Trace.Role.REGION;
     }
 
     @Override

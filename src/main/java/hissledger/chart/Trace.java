@@ -24,7 +24,9 @@ record Trace(Role role, int number, String name, String detail, List<Double> x, 
         /** Points without a line between them. */
         POINTS,
         /** The part of a candidate's line that costs next to nothing: drawn broad, without a name. */
-        ZONE
+        ZONE,
+        /** The name of a hatched region: no line. */
+        REGION
     }
 
     Trace {

@@ -21,6 +21,7 @@ import picocli.CommandLine.Spec;
             LedgerVerb.class,
             CompareVerb.class,
             OptimumVerb.class,
+            RegionsVerb.class,
             BiasVerb.class,
             DevicesVerb.class,
             NewVerb.class,
@@ -54,6 +55,7 @@ public final class Main implements Runnable {
         commandLine.registerConverter(FileKind.class, word -> Arguments.word(FileKind.values(), word));
         commandLine.registerConverter(
                 CompareVerb.ChartKind.class, word -> Arguments.word(CompareVerb.ChartKind.values(), word));
+        commandLine.registerConverter(RegionsVerb.Kind.class, word -> Arguments.word(RegionsVerb.Kind.values(), word));
         commandLine.registerConverter(ESeries.class, word -> Arguments.word(BiasVerb.RESISTORS, word));
         commandLine.setParameterExceptionHandler(Faults::usage);
         commandLine.setExecutionExceptionHandler((fault, command, parsed) -> Faults.execution(fault, command));

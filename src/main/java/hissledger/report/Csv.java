@@ -2,7 +2,9 @@ package hissledger.report;
 
 import hissledger.choose.Comparison;
 import hissledger.choose.Evaluation;
+import hissledger.choose.NoiseFigureMap;
 import hissledger.choose.OpenSearch;
+import hissledger.choose.Regions;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.ledger.Entry;
@@ -110,6 +112,59 @@ public final class Csv {
                             number(best.einVolts()),
                             number(Decibels.dbu(best.einVolts())),
                             String.join("; ", chosen)));
+        }
+        return text.toString();
+    }
+
+    /** One row a source resistance and frequency of the grid: who is quietest, by how much, and its current. */
+    public static String regions(Regions regions) {
+        StringBuilder text = new StringBuilder();
+        record(
+                text,
+                List.of(
+                        "sourceResistance_ohm",
+                        "frequency_Hz",
+                        "quietest",
+                        "next",
+                        "margin_dB",
+                        "ein_V_rtHz",
+                        "current_A"));
+        for (Regions.Column column : regions.columns()) {
+            for (int j = 0; j < regions.hertz().size(); j++) {
+                Regions.Lead lead = column.atGrid(j);
+                record(
+                        text,
+                        List.of(
+                                number(column.ohms()),
+                                number(regions.hertz().get(j)),
+                                regions.name(lead.winner()),
+                                regions.name(lead.next()),
+                                number(lead.marginDecibels()),
+                                number(column.gridVoltsPerRootHertz()
+                                        .get(lead.winner())
+                                        .get(j)),
+                                number(column.amps().get(lead.winner()))));
+            }
+        }
+        return text.toString();
+    }
+
+    /** One row a source resistance and current of the map. */
+    public static String noiseFigureMap(NoiseFigureMap map) {
+        StringBuilder text = new StringBuilder();
+        record(text, List.of("sourceResistance_ohm", "current_A", "noiseFigure_dB", "bestCurrent_A"));
+        List<Double> ohms = map.noiseFigure().across();
+        List<Double> amps = map.noiseFigure().up();
+        for (int k = 0; k < ohms.size(); k++) {
+            for (int j = 0; j < amps.size(); j++) {
+                record(
+                        text,
+                        List.of(
+                                number(ohms.get(k)),
+                                number(amps.get(j)),
+                                number(map.noiseFigure().at(k, j)),
+                                number(map.ridge().get(k))));
+            }
         }
         return text.toString();
     }

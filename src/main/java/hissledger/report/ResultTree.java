@@ -3,9 +3,13 @@ package hissledger.report;
 import hissledger.choose.BestCurrent;
 import hissledger.choose.Comparison;
 import hissledger.choose.Evaluation;
+import hissledger.choose.NoiseFigureMap;
 import hissledger.choose.OpenSearch;
+import hissledger.choose.Regions;
 import hissledger.choose.Scenario;
 import hissledger.choose.Sensitivity;
+import hissledger.choose.SpotCrossover;
+import hissledger.choose.Surface;
 import hissledger.ledger.Entry;
 import hissledger.ledger.EntrySpectrum;
 import hissledger.ledger.Figure;
@@ -76,6 +80,121 @@ public final class ResultTree {
         }
         tree.put("candidates", candidates);
         return tree;
+    }
+
+    /** Who is quietest over source resistance and frequency; rows of the grid by resistance, then by frequency. */
+    public static Map<String, Object> regions(Regions regions) {
+        Map<String, Object> tree = head(regions.scenario());
+        tree.put("candidates", names(regions));
+        tree.put("figure", regions.figure().key());
+        Map<String, Object> grid = new LinkedHashMap<>();
+        grid.put("sourceResistance_ohm", regions.resistanceOhms());
+        grid.put("frequency_Hz", regions.hertz());
+        List<Object> winners = new ArrayList<>();
+        for (Regions.Column column : regions.columns()) {
+            List<Integer> row = new ArrayList<>();
+            for (int j = 0; j < regions.hertz().size(); j++) {
+                row.add(column.atGrid(j).winner());
+            }
+            winners.add(row);
+        }
+        grid.put("quietest", winners);
+        grid.put("margin_dB", rows(regions.margin()));
+        grid.put(
+                "current_A",
+                regions.columns().stream().map(Regions.Column::amps).toList());
+        tree.put("grid", grid);
+        List<Object> steps = new ArrayList<>();
+        for (Regions.Column column : regions.steps()) {
+            Map<String, Object> step = new LinkedHashMap<>();
+            step.put("sourceResistance_ohm", column.ohms());
+            List<Object> spots = new ArrayList<>();
+            for (int spot = 0; spot < regions.scenario().spotsHertz().size(); spot++) {
+                Map<String, Object> at = new LinkedHashMap<>();
+                at.put("frequency_Hz", regions.scenario().spotsHertz().get(spot));
+                at.putAll(lead(regions, column.atSpot(spot)));
+                spots.add(at);
+            }
+            step.put("spots", spots);
+            step.put("band", lead(regions, column.overBand()));
+            steps.add(step);
+        }
+        tree.put("steps", steps);
+        List<Object> crossovers = new ArrayList<>();
+        regions.crossovers().forEach(crossover -> crossovers.add(crossover(crossover)));
+        tree.put("crossovers", crossovers);
+        return tree;
+    }
+
+    private static List<String> names(Regions regions) {
+        List<String> names = new ArrayList<>();
+        regions.scenario().candidates().forEach(candidate -> names.add(candidate.name()));
+        return names;
+    }
+
+    private static Map<String, Object> lead(Regions regions, Regions.Lead lead) {
+        Map<String, Object> tree = new LinkedHashMap<>();
+        tree.put("quietest", regions.name(lead.winner()));
+        tree.put("next", regions.name(lead.next()));
+        tree.put("margin_dB", lead.marginDecibels());
+        return tree;
+    }
+
+    /** A crossover; a band has no frequency. */
+    private static Map<String, Object> crossover(SpotCrossover crossover) {
+        Map<String, Object> tree = new LinkedHashMap<>();
+        tree.put("frequency_Hz", crossover.hertz());
+        tree.put("bipolarQuieterAtLeastResistance", crossover.bipolarQuieterAtLeastResistance());
+        List<Object> crossings = new ArrayList<>();
+        for (SpotCrossover.Crossing crossing : crossover.crossings()) {
+            Map<String, Object> row = new LinkedHashMap<>();
+            row.put("sourceResistance_ohm", crossing.ohms());
+            row.put("bipolar", crossing.bipolar());
+            row.put("jfet", crossing.jfet());
+            Map<String, Object> shifts = new LinkedHashMap<>();
+            crossing.shifts().forEach(shift -> shifts.put(shift.cause().key(), shift.ohms()));
+            row.put("atTenPercentMore_ohm", shifts);
+            crossings.add(row);
+        }
+        tree.put("crossings", crossings);
+        return tree;
+    }
+
+    /** Noise figure of one candidate over source resistance and current; rows by resistance, then by current. */
+    public static Map<String, Object> noiseFigureMap(NoiseFigureMap map) {
+        Map<String, Object> tree = head(map.scenario());
+        tree.put("candidate", map.candidate().name());
+        tree.put("device", map.candidate().device().id());
+        Map<String, Object> grid = new LinkedHashMap<>();
+        grid.put("sourceResistance_ohm", map.noiseFigure().across());
+        grid.put("current_A", map.noiseFigure().up());
+        grid.put("noiseFigure_dB", rows(map.noiseFigure()));
+        tree.put("grid", grid);
+        Map<String, Object> ridge = new LinkedHashMap<>();
+        ridge.put("sourceResistance_ohm", map.noiseFigure().across());
+        ridge.put("current_A", map.ridge());
+        ridge.put("noiseFigure_dB", map.ridgeDecibels());
+        tree.put("bestCurrent", ridge);
+        map.working().ifPresent(point -> {
+            Map<String, Object> working = new LinkedHashMap<>();
+            working.put("sourceResistance_ohm", point.ohms());
+            working.put("current_A", point.amps());
+            working.put("noiseFigure_dB", point.noiseFigureDecibels());
+            tree.put("workingPoint", working);
+        });
+        return tree;
+    }
+
+    private static List<Object> rows(Surface surface) {
+        List<Object> rows = new ArrayList<>();
+        for (int k = 0; k < surface.across().size(); k++) {
+            List<Double> row = new ArrayList<>();
+            for (int j = 0; j < surface.up().size(); j++) {
+                row.add(surface.at(k, j));
+            }
+            rows.add(row);
+        }
+        return rows;
     }
 
     /** The outcome of a search over open values. */
