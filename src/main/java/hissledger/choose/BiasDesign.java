@@ -74,6 +74,7 @@ public final class BiasDesign {
     private final BiasedStage stage;
     private final Candidate candidate;
     private final double wantedAmps;
+    private final CurrentRange range;
     private final int count;
     private final List<Corner> corners;
 
@@ -175,7 +176,9 @@ public final class BiasDesign {
 
     private record Ranked(Option option, double einVoltsSquared) {}
 
-    private BiasDesign(Scenario scenario, Candidate candidate, double wantedAmps, BiasRequest request) {
+    private BiasDesign(
+            Scenario scenario, Candidate candidate, double wantedAmps, CurrentRange range, BiasRequest request) {
+        this.range = range;
         this.scenario = scenario;
         this.candidate = candidate;
         this.wantedAmps = wantedAmps;
@@ -216,7 +219,7 @@ public final class BiasDesign {
                         1e3 * least));
             }
         }
-        return new BiasDesign(scenario, candidate, amps, request).outcome();
+        return new BiasDesign(scenario, candidate, amps, design.range(), request).outcome();
     }
 
     private static Parameter saturation(Device device) {
@@ -444,7 +447,8 @@ public final class BiasDesign {
 
     private void addIfKept(List<Option> options, BiasNetwork network, double supply) {
         OperatingPoint typical = typical(network, supply);
-        boolean near = Math.abs(typical.amps() / wantedAmps - 1.0) <= nearCurrent();
+        boolean near = Math.abs(typical.amps() / wantedAmps - 1.0) <= nearCurrent()
+                && range.clamp(typical.amps()) == typical.amps();
         if (near && worstSwing(network, supply) >= request.headroomVolts()) {
             double spread =
                     (highest(network, supply).amps() - lowest(network, supply).amps()) / typical.amps();

@@ -24,7 +24,12 @@ public record Comparison(Scenario scenario, Figure figure, List<Evaluation> rank
 
     /** The figure that a scenario is decided by: the first that its target limits, else the flat EIN. */
     public static Figure decidingFigure(Scenario scenario) {
-        return scenario.target().inOrder().keySet().stream().findFirst().orElse(Figure.EIN_FLAT);
+        return decidingFigure(scenario.target());
+    }
+
+    /** The figure that a target decides by: the first that it limits, else the flat EIN. */
+    public static Figure decidingFigure(Target target) {
+        return target.inOrder().keySet().stream().findFirst().orElse(Figure.EIN_FLAT);
     }
 
     /** Computes every candidate and ranks them by a figure. */
@@ -50,6 +55,13 @@ public record Comparison(Scenario scenario, Figure figure, List<Evaluation> rank
     /** The quietest candidate. */
     public Evaluation winner() {
         return ranked.get(0);
+    }
+
+    /** The quietest candidate that keeps the limits of the scenario; empty where none does. */
+    public Optional<Evaluation> bestWithinLimits() {
+        return ranked.stream()
+                .filter(evaluation -> evaluation.broken(scenario.limits()).isEmpty())
+                .findFirst();
     }
 
     /** By how many dB the quietest candidate leads the next under the ranking figure; empty for a single candidate. */

@@ -43,7 +43,8 @@ public record Design(
     /** Greatest current that a search tries where nothing else bounds it, A. */
     public static final double GREATEST_AMPS = 0.1;
 
-    private static final double DECADE = 10.0;
+    /** A gain curve is continued beyond its points by this factor of current, and no further. */
+    public static final double CONTINUED_FACTOR = 10.0;
 
     public Design {
         path = List.copyOf(path);
@@ -101,7 +102,7 @@ public record Design(
                     double first = gain.points().get(0).currentAmps();
                     double last = gain.points().get(gain.points().size() - 1).currentAmps();
                     String why = "one decade beyond the published current gain of " + device.id();
-                    return range.atLeast(first / DECADE, why).atMost(last * DECADE, why);
+                    return range.atLeast(first / CONTINUED_FACTOR, why).atMost(last * CONTINUED_FACTOR, why);
                 })
                 .orElse(range);
     }

@@ -5,6 +5,7 @@ import hissledger.ledger.Figure;
 import hissledger.ledger.Ledger;
 import hissledger.physics.Decibels;
 import hissledger.physics.Weighting;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -48,6 +49,11 @@ public record Evaluation(Design design, double amps, Optional<BestCurrent.Optimu
     /** The candidate's name. */
     public String name() {
         return design.candidate().name();
+    }
+
+    /** The limits of a scenario that it breaks. */
+    public List<Limits.Kind> broken(Limits limits) {
+        return limits.brokenBy(ledger.frontEnd(), amps * design.deviceCount());
     }
 
     /** Margin to the target, dB: the least over all limited figures, positive where it is met; empty without a target. */

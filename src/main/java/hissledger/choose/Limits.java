@@ -1,5 +1,12 @@
 package hissledger.choose;
 
+import hissledger.circuit.FrontEnd;
+import hissledger.ledger.Accounting;
+import hissledger.ledger.Headroom;
+import hissledger.twoport.ChainPass;
+import hissledger.twoport.Frequencies;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.OptionalDouble;
 
 /**
@@ -17,6 +24,9 @@ public record Limits(
         OptionalDouble powerWatts,
         OptionalDouble headroomVolts,
         OptionalDouble inputFarads) {
+    /** A limit that a search ran into is kept, whatever its last bit. */
+    private static final double ROUNDING = 1e-9;
+
     /** What a limit is set on; in the order in which a scenario names them. */
     public enum Kind {
         TOTAL_CURRENT("limits.totalCurrent", "A", false),
@@ -70,6 +80,45 @@ public record Limits(
         };
     }
 
+    /**
+     * Which of these limits a front end breaks.
+     *
+     * @param totalCurrent current of all its devices, A
+     */
+    public List<Kind> brokenBy(FrontEnd frontEnd, double totalCurrent) {
+        List<Kind> broken = new ArrayList<>();
+        if (totalCurrent > totalAmps.orElse(Double.POSITIVE_INFINITY) * (1.0 + ROUNDING)) {
+            broken.add(Kind.TOTAL_CURRENT);
+        }
+        double watts = totalCurrent * supplyVolts.orElse(0.0);
+        if (watts > powerWatts.orElse(Double.POSITIVE_INFINITY) * (1.0 + ROUNDING)) {
+            broken.add(Kind.POWER);
+        }
+        if (headroomVolts.isPresent()
+                && Headroom.emfVolts(frontEnd).orElse(Double.POSITIVE_INFINITY) < headroomVolts.getAsDouble()) {
+            broken.add(Kind.HEADROOM);
+        }
+        if (inputFarads.isPresent() && inputFarads(frontEnd) > inputFarads.getAsDouble()) {
+            broken.add(Kind.INPUT_CAPACITANCE);
+        }
+        return broken;
+    }
+
+    /** Input capacitance of the stage at 1 kHz, Im C/A over ω, F. */
+    private static double inputFarads(FrontEnd frontEnd) {
+        Frequencies at = Frequencies.of(Accounting.REFERENCE_HERTZ);
+        ChainPass voltage = new ChainPass(at);
+        voltage.beginWith(1.0, 0.0, 0.0);
+        frontEnd.stage().walk(voltage);
+        ChainPass current = new ChainPass(at);
+        current.beginWith(0.0, 1.0, 0.0);
+        frontEnd.stage().walk(current);
+        double aRe = voltage.rowVoltageRe()[0];
+        double aIm = voltage.rowVoltageIm()[0];
+        double susceptance =
+                (current.rowVoltageIm()[0] * aRe - current.rowVoltageRe()[0] * aIm) / (aRe * aRe + aIm * aIm);
+        return susceptance / at.omega()[0];
+    }
     /** No limit. */
     public static Limits none() {
         OptionalDouble free = OptionalDouble.empty();

@@ -7,15 +7,11 @@ import hissledger.circuit.ResistorSource;
 import hissledger.circuit.Transformer;
 import hissledger.device.BipolarModel;
 import hissledger.device.DeviceKind;
-import hissledger.ledger.Accounting;
 import hissledger.ledger.BandWalk;
-import hissledger.ledger.Headroom;
 import hissledger.physics.Band;
 import hissledger.physics.Decibels;
 import hissledger.physics.Thermal;
 import hissledger.physics.Weighting;
-import hissledger.twoport.ChainPass;
-import hissledger.twoport.Frequencies;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
@@ -402,31 +398,9 @@ public final class OpenSearch {
         return good;
     }
 
+    /** Whether headroom and input capacitance are kept; the current is limited by its range. */
     private boolean allowed(FrontEnd frontEnd) {
-        if (limits.headroomVolts().isPresent()) {
-            double emf = Headroom.emfVolts(frontEnd).orElse(Double.POSITIVE_INFINITY);
-            if (emf < limits.headroomVolts().getAsDouble()) {
-                return false;
-            }
-        }
-        return limits.inputFarads().isEmpty()
-                || inputFarads(frontEnd) <= limits.inputFarads().getAsDouble();
-    }
-
-    /** Input capacitance of the stage at 1 kHz, Im C/A over ω, F. */
-    private static double inputFarads(FrontEnd frontEnd) {
-        Frequencies at = Frequencies.of(Accounting.REFERENCE_HERTZ);
-        ChainPass voltage = new ChainPass(at);
-        voltage.beginWith(1.0, 0.0, 0.0);
-        frontEnd.stage().walk(voltage);
-        ChainPass current = new ChainPass(at);
-        current.beginWith(0.0, 1.0, 0.0);
-        frontEnd.stage().walk(current);
-        double aRe = voltage.rowVoltageRe()[0];
-        double aIm = voltage.rowVoltageIm()[0];
-        double susceptance =
-                (current.rowVoltageIm()[0] * aRe - current.rowVoltageRe()[0] * aIm) / (aRe * aRe + aIm * aIm);
-        return susceptance / at.omega()[0];
+        return limits.brokenBy(frontEnd, 0.0).isEmpty();
     }
 
     /** How far one value may move from the best before the EIN has risen by 0.1 dB, the others and the current at their best. */

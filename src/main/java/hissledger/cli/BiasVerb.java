@@ -91,6 +91,7 @@ final class BiasVerb implements Callable<Integer> {
 
     @Override
     public Integer call() throws InputException {
+        outputs.check();
         BiasRequest request = request();
         if (target.isPresent()) {
             BiasFile.check(target.get());

@@ -20,6 +20,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 
 /** Candidates side by side. */
@@ -71,9 +72,11 @@ final class CompareVerb implements Callable<Integer> {
             names = "--chart-kind",
             paramLabel = "KIND",
             description = "density: EIN density against frequency (default); resistance: EIN against source resistance")
-    private ChartKind chartKind = ChartKind.DENSITY;
+    private Optional<ChartKind> chartKind = Optional.empty();
 
-    @Option(names = "--check", description = "exit with 1 if the quietest candidate misses the target of the scenario")
+    @Option(
+            names = "--check",
+            description = "exit with 1 if the quietest candidate that keeps the limits misses the target")
     private boolean check;
 
     @Spec
@@ -82,8 +85,21 @@ final class CompareVerb implements Callable<Integer> {
     @Override
     public Integer call() throws InputException {
         chart.check(spec);
+        outputs.check();
+        if (chartKind.isPresent() && !chart.isAsked()) {
+            throw new ParameterException(
+                    spec.commandLine(), "--chart-kind draws nothing without a file; add --chart FILE.png");
+        }
         Scenario scenario = inputs.read();
         Comparison comparison = Comparison.of(scenario, figure(scenario));
+        if (comparison.winner().ledger().figure(comparison.figure()).isEmpty()) {
+            throw new ParameterException(
+                    spec.commandLine(),
+                    comparison.figure().key() + " is not defined for this source"
+                            + (comparison.figure() == Figure.EQUIVALENT_NOISE_LEVEL
+                                    ? ", which states no sensitivity in V/Pa in air; add source.sensitivity, or sort --by einA"
+                                    : ", whose resistance is zero; sort --by einFlat"));
+        }
         if (chart.isAsked()) {
             chart.write(picture(comparison));
         }
@@ -92,7 +108,10 @@ final class CompareVerb implements Callable<Integer> {
                 CompareText.of(comparison),
                 () -> ResultTree.comparison(comparison),
                 () -> Csv.comparison(comparison));
-        boolean missed = comparison.winner().marginDecibels(scenario.target()).orElse(0.0) < 0.0;
+        boolean missed = comparison
+                .bestWithinLimits()
+                .map(best -> best.marginDecibels(scenario.target()).orElse(0.0) < 0.0)
+                .orElse(true);
         return check && missed ? ExitCode.TARGET_MISSED : ExitCode.DONE;
     }
 
@@ -101,7 +120,7 @@ final class CompareVerb implements Callable<Integer> {
     }
 
     private Picture picture(Comparison comparison) {
-        if (chartKind == ChartKind.DENSITY) {
+        if (chartKind.orElse(ChartKind.DENSITY) == ChartKind.DENSITY) {
             return ComparisonChart.density(comparison);
         }
         List<Double> ohms = ResistanceSweep.grid(SWEEP_POINTS_PER_DECADE);

@@ -4,6 +4,7 @@ import hissledger.chart.DeviceChart;
 import hissledger.device.Device;
 import hissledger.device.DeviceKind;
 import hissledger.device.DeviceParameter;
+import hissledger.device.Polarity;
 import hissledger.files.Catalogue;
 import hissledger.files.DeviceReader;
 import hissledger.files.Fault;
@@ -14,10 +15,12 @@ import hissledger.report.DeviceText;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -106,6 +109,13 @@ final class DevicesVerb implements Runnable {
 
         @Override
         public Integer call() throws InputException {
+            kind.ifPresent(word ->
+                    known("--kind", word, Arrays.stream(DeviceKind.values()).map(DeviceKind::label)));
+            polarity.ifPresent(word -> known(
+                    "--polarity",
+                    word,
+                    Arrays.stream(Polarity.values()).map(Polarity::label).filter(label -> !label.isEmpty())));
+            evidence.ifPresent(word -> known("--evidence", word, Stream.of("A", "B", "C")));
             double amps = quantity("--at", at, Quantities::amps);
             Optional<Double> ohms = rbbBelow.map(text -> quantity("--rbb-below", text, Quantities::ohms));
             Optional<Double> siemens = gmAbove.map(text -> quantity("--gm-above", text, Quantities::siemens));
@@ -121,7 +131,12 @@ final class DevicesVerb implements Runnable {
                     .filter(device -> hfeAbove.isEmpty() || gainAbove(device, DeviceKind.BIPOLAR, amps, hfeAbove.get()))
                     .filter(device -> siemens.isEmpty() || gainAbove(device, DeviceKind.JFET, amps, siemens.get()))
                     .toList();
-            spec.commandLine().getOut().print(DeviceText.list(chosen, amps));
+            spec.commandLine()
+                    .getOut()
+                    .print(
+                            chosen.isEmpty()
+                                    ? "No device fits all of these options; leave one out or loosen it.\n"
+                                    : DeviceText.list(chosen, amps));
             return ExitCode.DONE;
         }
 
@@ -130,6 +145,14 @@ final class DevicesVerb implements Runnable {
                     && DeviceCurves.at(device, amps, DeviceCurves.USUAL_HERTZ)
                             .filter(point -> point.gain() > limit)
                             .isPresent();
+        }
+
+        private void known(String option, String word, Stream<String> words) {
+            List<String> all = words.toList();
+            if (!all.contains(word)) {
+                throw new ParameterException(
+                        spec.commandLine(), option + " must be " + String.join(" or ", all) + ", was '" + word + "'");
+            }
         }
 
         private double quantity(String option, String text, ToDoubleFunction<String> reader) {

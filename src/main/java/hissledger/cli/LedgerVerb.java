@@ -68,6 +68,7 @@ final class LedgerVerb implements Callable<Integer> {
 
     @Override
     public Integer call() throws InputException {
+        outputs.check();
         Scenario scenario = selected(inputs.read());
         Figure figure = by.isPresent() ? Arguments.figure(spec, by.get()) : Figure.EIN_FLAT;
         List<Evaluation> evaluations = Comparison.evaluate(scenario, figure.weighting());

@@ -61,6 +61,7 @@ final class OptimumVerb implements Callable<Integer> {
     @Override
     public Integer call() throws InputException {
         chart.check(spec);
+        outputs.check();
         Scenario scenario = inputs.read();
         Figure figure = by.isPresent() ? Arguments.figure(spec, by.get()) : Comparison.decidingFigure(scenario);
         List<OptimumText.Searched> searched = new ArrayList<>();

@@ -92,6 +92,7 @@ final class RegionsVerb implements Callable<Integer> {
     @Override
     public Integer call() throws InputException {
         chart.check(spec);
+        outputs.check();
         double fromOhms = ohms("--from", from, ResistanceSweep.LEAST_OHMS);
         double toOhms = ohms("--to", to, ResistanceSweep.GREATEST_OHMS);
         checkRange(fromOhms, toOhms);

@@ -2,6 +2,7 @@ package hissledger.files;
 
 import hissledger.choose.Candidate;
 import hissledger.choose.CurrentChoice;
+import hissledger.choose.Design;
 import hissledger.circuit.Arrangement;
 import hissledger.circuit.CommonLead;
 import hissledger.circuit.NextStage;
@@ -34,7 +35,13 @@ final class CandidateReader {
     private Optional<Device> device = Optional.empty();
     private Optional<CurrentChoice> current = Optional.empty();
 
-    CandidateReader(Fields fields, Faults faults, Set<Fault> elsewhere, Catalogue catalogue) {
+    /** A limit written in decimal is met although its binary form is not. */
+    private static final double ROUNDING = 1e-12;
+
+    private final Figure deciding;
+
+    CandidateReader(Fields fields, Faults faults, Set<Fault> elsewhere, Catalogue catalogue, Figure deciding) {
+        this.deciding = deciding;
         this.fields = fields;
         this.faults = faults;
         this.elsewhere = elsewhere;
@@ -165,13 +172,13 @@ final class CandidateReader {
 
     private Optional<CurrentChoice> currentChoice(Node node) {
         if (node.kind() == Node.Kind.TEXT && node.text().equals(OPTIMUM)) {
-            return Optional.of(CurrentChoice.Optimum.usual());
+            return Optional.of(new CurrentChoice.Optimum(OptionalDouble.empty(), OptionalDouble.empty(), deciding));
         }
         if (node.kind() == Node.Kind.OBJECT) {
             return CandidateKeys.OPEN_CURRENT
                     .read(node, faults)
                     .flatMap(open -> open.get(CandidateKeys.OPTIMUM))
-                    .map(CandidateReader::optimum);
+                    .map(this::optimum);
         }
         if (node.kind() == Node.Kind.TEXT && node.text().chars().noneMatch(Character::isDigit)) {
             faults.at(node, "must be a current, like \"1.2 mA\", or \"" + OPTIMUM + "\", was " + node.quoted());
@@ -180,11 +187,11 @@ final class CandidateReader {
         return CandidateKeys.GIVEN_CURRENT.read(node, faults).map(CurrentChoice.Given::new);
     }
 
-    private static CurrentChoice optimum(Fields search) {
+    private CurrentChoice optimum(Fields search) {
         return new CurrentChoice.Optimum(
                 optional(search.get(CandidateKeys.FROM)),
                 optional(search.get(CandidateKeys.TO)),
-                search.get(CandidateKeys.FOR, Figure.EIN_FLAT));
+                search.get(CandidateKeys.FOR, deciding));
     }
 
     private static OptionalDouble optional(Optional<Double> value) {
@@ -213,6 +220,9 @@ final class CandidateReader {
         if (current.get() instanceof CurrentChoice.Given given && given.amps() > limit) {
             faults.at(node, "must not exceed " + why + ", " + atMost + ", was " + node.quoted());
         }
+        if (current.get() instanceof CurrentChoice.Given given && given.amps() <= limit) {
+            checkGainIsKnown(node, given.amps());
+        }
         if (current.get() instanceof CurrentChoice.Optimum open) {
             double from = open.fromAmps().orElse(0.0);
             double to = open.toAmps().orElse(Double.POSITIVE_INFINITY);
@@ -222,6 +232,23 @@ final class CandidateReader {
                 faults.at(node, "leaves no current to choose: from is above " + why + ", " + atMost);
             }
         }
+    }
+
+    /** Beyond one decade from the published points nothing is known of the gain. */
+    private void checkGainIsKnown(Node node, double amps) {
+        device.flatMap(Device::currentGain)
+                .filter(gain -> gain.points().size() > 1)
+                .ifPresent(gain -> {
+                    double first = gain.points().get(0).currentAmps() / Design.CONTINUED_FACTOR;
+                    double last = gain.points().get(gain.points().size() - 1).currentAmps() * Design.CONTINUED_FACTOR;
+                    if (amps < first * (1.0 - ROUNDING) || amps > last * (1.0 + ROUNDING)) {
+                        faults.at(
+                                node,
+                                "lies more than one decade beyond the published current gain of "
+                                        + device.orElseThrow().id() + "; state " + Quantities.brief(first, "A", DIGITS)
+                                        + " to " + Quantities.brief(last, "A", DIGITS) + ", was " + node.quoted());
+                    }
+                });
     }
 
     /** The candidate, once the whole file was found free of faults. */

@@ -1,6 +1,7 @@
 package hissledger.files;
 
 import hissledger.choose.Candidate;
+import hissledger.choose.Comparison;
 import hissledger.choose.Limits;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
@@ -199,8 +200,9 @@ public final class ScenarioReader {
     private List<CandidateReader> candidates(Fields fields) {
         List<CandidateReader> candidates = new ArrayList<>();
         Set<String> names = new HashSet<>();
+        Figure deciding = Comparison.decidingFigure(target(fields));
         for (Located<Fields> candidate : fields.get(ScenarioKeys.CANDIDATES).orElse(List.of())) {
-            CandidateReader reader = new CandidateReader(candidate.value(), faults, elsewhere, catalogue);
+            CandidateReader reader = new CandidateReader(candidate.value(), faults, elsewhere, catalogue, deciding);
             reader.check(names, fields.get(ScenarioKeys.PATH).orElse(List.of()));
             candidates.add(reader);
         }

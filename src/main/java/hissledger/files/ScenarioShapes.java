@@ -191,7 +191,7 @@ final class ScenarioShapes {
         static final Key<Figure> FOR = Key.optional(
                 "for",
                 Values.word(List.of(Figure.values()), Figure::key),
-                "the figure to minimise; einFlat unless stated");
+                "the figure to minimise; unless stated the first that the target limits, else einFlat");
         static final Key<Fields> OPTIMUM = Key.required(
                 "optimum", Values.object(Shape.of("a search for the best current", FROM, TO, FOR)), "where to search");
         static final Shape OPEN_CURRENT = Shape.of("an open current", OPTIMUM);

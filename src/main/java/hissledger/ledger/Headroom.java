@@ -15,6 +15,7 @@ import java.util.OptionalDouble;
  * at low frequency.
  *
  * @param harmonic 2, or 3 for a balanced pair
+ * @param cutOff whether a device is cut off there, before the harmonic reaches 1 %
  * @param stageVolts level between the stage's input terminals, V rms
  * @param emfVolts the EMF that gives it at 1 kHz, V rms
  * @param soundPressureDecibels sound pressure level of that EMF, dB SPL; empty without a sensitivity in V/Pa
@@ -22,6 +23,7 @@ import java.util.OptionalDouble;
  */
 public record Headroom(
         int harmonic,
+        boolean cutOff,
         double stageVolts,
         double emfVolts,
         OptionalDouble soundPressureDecibels,
@@ -40,8 +42,8 @@ public record Headroom(
                 ? OptionalDouble.of(Decibels.ofAmplitudeRatio(
                         emf / signal.voltsPerUnit().getAsDouble() / Constants.REFERENCE_SOUND_PRESSURE_PASCALS))
                 : OptionalDouble.empty();
-        return Optional.of(
-                new Headroom(limit.harmonic(), stageVolts, emf, sound, Decibels.ofAmplitudeRatio(emf / einVolts)));
+        return Optional.of(new Headroom(
+                limit.harmonic(), limit.cutOff(), stageVolts, emf, sound, Decibels.ofAmplitudeRatio(emf / einVolts)));
     }
 
     /** The EMF at 1 kHz that makes 1 % of the stage's lowest harmonic, V rms; empty where the device law does not tell. */

@@ -3,13 +3,18 @@ package hissledger.report;
 import hissledger.choose.BestCurrent;
 import hissledger.choose.Comparison;
 import hissledger.choose.Crossover;
+import hissledger.choose.CurrentChoice;
 import hissledger.choose.Evaluation;
+import hissledger.choose.Limits;
 import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.circuit.CapacitorSource;
 import hissledger.circuit.Source;
 import hissledger.circuit.TableSource;
 import hissledger.device.Basis;
+import hissledger.device.Device;
+import hissledger.device.DeviceKind;
+import hissledger.device.DeviceParameter;
 import hissledger.files.Phrases;
 import hissledger.ledger.Accounting;
 import hissledger.ledger.Entry;
@@ -21,6 +26,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
 import java.util.stream.Collectors;
@@ -37,11 +43,14 @@ public final class CompareText {
         Words.conditions(scenario).forEach(condition -> line(text, condition));
         line(text, "Sorted by " + comparison.figure().words() + ", quietest first.");
         target(scenario.target()).forEach(limit -> line(text, limit));
+        Words.limits(scenario.limits()).ifPresent(limit -> line(text, limit));
         line(text, "");
         text.append(table(comparison).render());
         line(text, "");
         decision(comparison).forEach(sentence -> Words.wrapped(sentence).forEach(part -> line(text, part)));
-        List<String> currents = bestCurrents(comparison.ranked());
+        List<String> currents = new ArrayList<>();
+        bestCurrents(comparison.ranked()).forEach(sentence -> currents.addAll(Words.wrapped(sentence)));
+        cautions(comparison.ranked()).forEach(caution -> currents.addAll(Words.wrapped(caution)));
         if (!currents.isEmpty()) {
             line(text, "");
             currents.forEach(sentence -> line(text, sentence));
@@ -169,8 +178,66 @@ public final class CompareText {
         } else {
             sentences.add("One candidate: " + quoted(winner) + ".");
         }
+        limits(comparison, sentences);
         comparison.crossover().ifPresent(crossover -> sentences.add(crossover(comparison, crossover)));
         return sentences;
+    }
+
+    /** Which candidates break the limits of the scenario, and who is quietest without them. */
+    private static void limits(Comparison comparison, List<String> sentences) {
+        List<String> breaking = new ArrayList<>();
+        for (Evaluation evaluation : comparison.ranked()) {
+            List<Limits.Kind> broken = evaluation.broken(comparison.scenario().limits());
+            if (!broken.isEmpty()) {
+                breaking.add(quoted(evaluation) + " ("
+                        + broken.stream().map(Limits.Kind::path).collect(Collectors.joining(", ")) + ")");
+            }
+        }
+        if (breaking.isEmpty()) {
+            return;
+        }
+        sentences.add(
+                "Beyond the limits of the scenario: " + String.join(", ", breaking) + "; the verb optimum keeps them.");
+        comparison
+                .bestWithinLimits()
+                .ifPresentOrElse(
+                        best -> sentences.add("Quietest within the limits: " + quoted(best) + "."),
+                        () -> sentences.add("No candidate keeps the limits."));
+    }
+
+    /** What a designer must know of the working points: a current that not every device carries, a gain beyond the sheet. */
+    static List<String> cautions(List<Evaluation> evaluations) {
+        List<String> cautions = new ArrayList<>();
+        for (Evaluation evaluation : evaluations) {
+            Device device = evaluation.candidate().device();
+            double amps = evaluation.amps();
+            if (device.kind() == DeviceKind.JFET) {
+                double least = device.parameter(DeviceParameter.DRAIN_SATURATION_CURRENT)
+                        .flatMap(idss ->
+                                idss.min().isPresent() ? Optional.of(idss.min().getAsDouble()) : Optional.empty())
+                        .orElse(Double.POSITIVE_INFINITY);
+                if (amps > least) {
+                    cautions.add("Caution: " + quoted(evaluation) + " runs at " + Words.value(amps, "A")
+                            + " each, above the least IDSS of " + device.id() + ", " + Words.value(least, "A")
+                            + ": not every device carries it.");
+                }
+            }
+            device.currentGain()
+                    .filter(gain -> gain.points().size() > 1)
+                    .filter(gain -> amps < gain.points().get(0).currentAmps()
+                            || amps
+                                    > gain.points()
+                                            .get(gain.points().size() - 1)
+                                            .currentAmps())
+                    .ifPresent(gain -> cautions.add("Caution: " + quoted(evaluation) + " runs at "
+                            + Words.value(amps, "A")
+                            + " each, where the current gain of " + device.id()
+                            + " is continued beyond its published points, "
+                            + Words.value(gain.points().get(0).currentAmps(), "A") + " to "
+                            + Words.value(
+                                    gain.points().get(gain.points().size() - 1).currentAmps(), "A") + "."));
+        }
+        return cautions;
     }
 
     private static String crossover(Comparison comparison, Crossover crossover) {
@@ -206,8 +273,9 @@ public final class CompareText {
                 continue;
             }
             BestCurrent.Optimum optimum = evaluation.optimum().get();
-            StringBuilder sentence = new StringBuilder("Best current of " + evaluation.name() + ": "
-                    + Words.value(optimum.amps(), "A") + " each; within 0.1 dB of it from "
+            StringBuilder sentence = new StringBuilder("Best current of " + evaluation.name() + ": least "
+                    + minimised(evaluation)
+                    + " at " + Words.value(optimum.amps(), "A") + " each; EIN within 0.1 dB of its least from "
                     + Words.value(optimum.flatFromAmps(), "A") + " to " + Words.value(optimum.flatToAmps(), "A"));
             optimum.bound()
                     .ifPresent(bound -> sentence.append("; held back by: ").append(bound));
@@ -220,6 +288,12 @@ public final class CompareText {
             sentences.add(sentence.append('.').toString());
         }
         return sentences;
+    }
+
+    private static String minimised(Evaluation evaluation) {
+        return evaluation.candidate().current() instanceof CurrentChoice.Optimum open
+                ? Words.ein(open.figure().weighting())
+                : Words.ein(Weighting.FLAT);
     }
 
     /** Defaults used and values that rest on little, device by device. */

@@ -44,8 +44,13 @@ public final class LedgerText {
                 text.append('\n').append(impedances(ledger).render());
                 text.append('\n').append(running(ledger).render());
             }
-            CompareText.bestCurrents(List.of(evaluation))
-                    .forEach(sentence -> text.append('\n').append(sentence).append('\n'));
+            List<String> working = new ArrayList<>();
+            CompareText.bestCurrents(List.of(evaluation)).forEach(sentence -> working.addAll(Words.wrapped(sentence)));
+            CompareText.cautions(List.of(evaluation)).forEach(caution -> working.addAll(Words.wrapped(caution)));
+            if (!working.isEmpty()) {
+                text.append('\n');
+                working.forEach(remark -> text.append(remark).append('\n'));
+            }
         }
         List<String> remarks = CompareText.remarks(evaluations);
         if (!remarks.isEmpty()) {
@@ -202,15 +207,13 @@ public final class LedgerText {
     }
 
     private static void headroom(TextTable table, Headroom headroom) {
-        String harmonic = headroom.harmonic() == 2 ? "second" : "third";
-        level(table, "1 % " + harmonic + " harmonic of the device: at the stage's input", headroom.stageVolts());
-        level(table, "1 % " + harmonic + " harmonic of the device: EMF at 1 kHz", headroom.emfVolts());
+        String what = headroom.cutOff()
+                ? "cut-off of the device"
+                : "1 % " + (headroom.harmonic() == 2 ? "second" : "third") + " harmonic of the device";
+        level(table, what + ": at the stage's input", headroom.stageVolts());
+        level(table, what + ": EMF at 1 kHz", headroom.emfVolts());
         if (headroom.soundPressureDecibels().isPresent()) {
-            ratio(
-                    table,
-                    "1 % " + harmonic + " harmonic of the device: sound pressure",
-                    headroom.soundPressureDecibels(),
-                    "dB SPL");
+            ratio(table, what + ": sound pressure", headroom.soundPressureDecibels(), "dB SPL");
         }
         ratio(table, "dynamic range, that EMF over EIN flat", OptionalDouble.of(headroom.dynamicRangeDecibels()), "dB");
     }

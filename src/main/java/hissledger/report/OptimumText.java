@@ -3,7 +3,6 @@ package hissledger.report;
 import hissledger.choose.BestCurrent;
 import hissledger.choose.Candidate;
 import hissledger.choose.ImpossibleLimitsException;
-import hissledger.choose.Limits;
 import hissledger.choose.OpenSearch;
 import hissledger.choose.Scenario;
 import hissledger.choose.Sensitivity;
@@ -14,7 +13,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
-import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** The outcome of a search over open values as text. */
@@ -47,25 +45,12 @@ public final class OptimumText {
         text.append(scenario.title()).append('\n');
         Words.conditions(scenario).forEach(line -> text.append(line).append('\n'));
         text.append("Minimised: ").append(Words.ein(figure.weighting())).append(".\n");
-        limits(scenario.limits()).ifPresent(line -> text.append(line).append('\n'));
+        Words.limits(scenario.limits()).ifPresent(line -> text.append(line).append('\n'));
         text.append('\n').append(table(searched).render()).append('\n');
         for (Searched each : searched) {
             describe(text, each);
         }
         return text.toString();
-    }
-
-    private static Optional<String> limits(Limits limits) {
-        List<String> parts = new ArrayList<>();
-        limits.totalAmps().ifPresent(amps -> parts.add("current of all devices at most " + Phrases.brief(amps, "A")));
-        limits.powerWatts()
-                .ifPresent(watts -> parts.add("power at most " + Phrases.brief(watts, "W") + " from "
-                        + Phrases.brief(limits.supplyVolts().orElse(0.0), "V")));
-        limits.headroomVolts()
-                .ifPresent(
-                        volts -> parts.add("1 % harmonic not below an EMF of " + Phrases.value(volts, "V") + " rms"));
-        limits.inputFarads().ifPresent(farads -> parts.add("input capacitance at most " + Phrases.brief(farads, "F")));
-        return parts.isEmpty() ? Optional.empty() : Optional.of("Limits: " + String.join("; ", parts) + ".");
     }
 
     /** Why the limits leave a candidate no choice, and what would help. */

@@ -305,6 +305,7 @@ public final class ResultTree {
         Optional<Headroom> headroom = ledger.headroom();
         tree.put("secondHarmonicOnePercent_V", harmonic(headroom, 2));
         tree.put("thirdHarmonicOnePercent_V", harmonic(headroom, 3));
+        tree.put("onePercentIsCutOff", headroom.map(Headroom::cutOff).orElse(false));
         tree.put("onePercentAtEmf_V", of(headroom.map(Headroom::emfVolts)));
         tree.put(
                 "onePercent_dBSPL",

@@ -1,7 +1,9 @@
 package hissledger.report;
 
 import hissledger.choose.Evaluation;
+import hissledger.choose.Limits;
 import hissledger.choose.Scenario;
+import hissledger.circuit.Signal;
 import hissledger.circuit.StagePlan;
 import hissledger.files.Phrases;
 import hissledger.physics.Decibels;
@@ -9,6 +11,7 @@ import hissledger.physics.Weighting;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Values and conditions in words, the same in every report. */
@@ -51,12 +54,39 @@ final class Words {
 
     /** The lines that head every report: what the figures below them refer to. */
     static List<String> conditions(Scenario scenario) {
-        return List.of(
+        List<String> lines = new ArrayList<>(List.of(
                 "Source: " + Phrases.source(scenario.source()) + ". Path and stage at "
                         + Phrases.temperature(scenario.temperatureKelvin()) + ".",
                 "Band " + Phrases.band(scenario.band())
                         + ", unweighted unless said otherwise. EIN refers to the source's EMF and",
-                "includes the source's own noise; NF refers to a source at 290 K.");
+                "includes the source's own noise; NF refers to a source at 290 K."));
+        signal(scenario.source().signal()).ifPresent(lines::add);
+        return lines;
+    }
+
+    /** The limits of a scenario, one line; empty for none. */
+    static Optional<String> limits(Limits limits) {
+        List<String> parts = new ArrayList<>();
+        limits.totalAmps().ifPresent(amps -> parts.add("current of all devices at most " + Phrases.brief(amps, "A")));
+        limits.powerWatts()
+                .ifPresent(watts -> parts.add("power at most " + Phrases.brief(watts, "W") + " from "
+                        + Phrases.brief(limits.supplyVolts().orElse(0.0), "V")));
+        limits.headroomVolts()
+                .ifPresent(
+                        volts -> parts.add("1 % harmonic not below an EMF of " + Phrases.value(volts, "V") + " rms"));
+        limits.inputFarads().ifPresent(farads -> parts.add("input capacitance at most " + Phrases.brief(farads, "F")));
+        return parts.isEmpty() ? Optional.empty() : Optional.of("Limits: " + String.join("; ", parts) + ".");
+    }
+
+    /** What the source gives, one line; empty where nothing is stated. */
+    private static Optional<String> signal(Signal signal) {
+        List<String> parts = new ArrayList<>();
+        signal.voltsPerUnit()
+                .ifPresent(volts -> parts.add("Sensitivity " + Phrases.brief(volts, "V/" + signal.unit())));
+        signal.referenceVolts()
+                .ifPresent(volts -> parts.add((parts.isEmpty() ? "Reference" : "reference") + " level: an EMF of "
+                        + Phrases.brief(volts, "V") + " rms"));
+        return parts.isEmpty() ? Optional.empty() : Optional.of(String.join("; ", parts) + ".");
     }
 
     /** Device and how many of them in all, both sides of a pair counted: "bf862 x4". */

@@ -96,8 +96,29 @@ class HarmonicsTest {
     @Test
     void degenerationIsWorthItsLoopGainSquared() {
         double bare = Harmonics.secondOfSingle(BIPOLAR, 0.0).inputVolts().getAsDouble();
+        assertThat(Harmonics.secondOfSingle(BIPOLAR, 9.0).cutOff()).isFalse();
         double loop = Harmonics.secondOfSingle(BIPOLAR, 9.0).inputVolts().getAsDouble();
         assertThat(loop / bare).isCloseTo(100.0, within(1e-9));
+    }
+
+    /** No level beyond the one that takes the current of a device to zero: RE times the current, and little more. */
+    @Test
+    void cutOffLimitsAMuchDegeneratedStage() {
+        double vt = Thermal.voltageVolts(KELVIN);
+        double ohms = 10e3;
+        double degeneration = ohms * AMPS / vt;
+        Harmonics.Limit single = Harmonics.secondOfSingle(BIPOLAR, degeneration);
+        assertThat(single.cutOff()).isTrue();
+        double peak = Math.sqrt(2.0) * single.inputVolts().getAsDouble();
+        // beyond RE times the current one VT is left: the device carries 1/e of its current there and falls off
+        assertThat(peak).isCloseTo(ohms * AMPS + vt, within(1e-9));
+        Harmonics.Limit pair = Harmonics.thirdOfPair(BIPOLAR, degeneration);
+        assertThat(pair.cutOff()).isTrue();
+        assertThat(Math.sqrt(2.0) * pair.inputVolts().getAsDouble()).isCloseTo(2.0 * (ohms * AMPS + vt), within(1e-9));
+        double overdrive = PINCH_OFF * Math.sqrt(AMPS / IDSS);
+        Harmonics.Limit jfet = Harmonics.secondOfSingle(JFET, 2.0 * AMPS / overdrive * ohms);
+        assertThat(jfet.cutOff()).isTrue();
+        assertThat(Math.sqrt(2.0) * jfet.inputVolts().getAsDouble()).isCloseTo(ohms * AMPS + overdrive, within(1e-9));
     }
 
     /** Common practice, no source: a bipolar transistor reaches 1 % at 1 mV peak; the closed form gives 1.03 mV at 300 K. */

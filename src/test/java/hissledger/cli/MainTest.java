@@ -55,6 +55,65 @@ class MainTest {
     }
 
     @Test
+    void compareHoldsTheLimitsOfTheScenarioAgainstItsWinner() {
+        assertThat(run("compare", SCENARIOS.resolve("cartridge-mc.json").toString())
+                        .out()
+                        .replaceAll("\\s+", " "))
+                .contains(
+                        "Limits: current of all devices at most 20 mA; power at most 360 mW from 18 V.",
+                        "\"four low-rbb' PNP\" (limits.totalCurrent, limits.power)",
+                        "Quietest within the limits: \"1:10 into a JFET\".",
+                        "above the least IDSS of lsk170, 2.60 mA");
+    }
+
+    @Test
+    void theBestCurrentIsThatOfTheFigureTheTargetDecidesBy() {
+        String file = SCENARIOS.resolve("ribbon-secondary.json").toString();
+        String current = "one PNP: least EIN A-weighted at 1.18 mA each";
+        assertThat(run("compare", file).out()).contains(current);
+        assertThat(run("optimum", file).out()).containsPattern("\\[one PNP\\]\nCurrent: best 1.18 mA each");
+    }
+
+    @Test
+    void figuresThatAreNotDefinedAreNotRanked() {
+        Outcome outcome =
+                run("compare", SCENARIOS.resolve("cartridge-mc.json").toString(), "--by", "equivalentNoiseLevel");
+        assertThat(outcome.exit()).isEqualTo(2);
+        assertThat(outcome.err())
+                .contains("equivalentNoiseLevel is not defined for this source", "add source.sensitivity");
+    }
+
+    @Test
+    void twoResultsInOnePlaceAreRefused() {
+        String same = folder.resolve("same").toString();
+        assertThat(run("compare", VOCAL, "--json", same, "--csv", same).err()).contains("name the same file");
+        assertThat(run("ledger", VOCAL, "--json", "-", "--csv", "-").err())
+                .contains("standard output takes one of --json and --csv");
+        assertThat(Path.of(same)).doesNotExist();
+        assertThat(run("compare", VOCAL, "--chart-kind", "resistance").err()).contains("add --chart FILE.png");
+    }
+
+    @Test
+    void aListOfDevicesSaysWhatItDoesNotKnowAndWhenNothingFits() {
+        assertThat(run("devices", "list", "--kind", "fet").err())
+                .contains("--kind must be bipolar or jfet or amplifier, was 'fet'");
+        assertThat(run("devices", "list", "--kind", "jfet", "--polarity", "pnp").out())
+                .startsWith("No device fits all of these options");
+    }
+
+    @Test
+    void aCurrentFarBeyondThePublishedGainIsRefusedAndANearOneIsSaid() throws java.io.IOException {
+        String shipped = Files.readString(SCENARIOS.resolve("guitar-pickup.json"));
+        String stated = shipped.replace("{ \"optimum\": { \"for\": \"einA\" } }", "\"5 uA\"");
+        assertThat(stated).isNotEqualTo(shipped);
+        assertThat(run("compare", file("near.json", stated)).out().replaceAll("\\s+", " "))
+                .contains("is continued beyond its published points, 10.0 µA to");
+        assertThat(run("compare", file("far.json", stated.replace("\"5 uA\"", "\"0.5 uA\"")))
+                        .err())
+                .contains("lies more than one decade beyond the published current gain of bc550c");
+    }
+
+    @Test
     void ledgerPrintsEveryEntryAndItsTotal() {
         Outcome outcome = run("ledger", VOCAL, "--candidate", "PNP switch", "--full");
         assertThat(outcome.exit()).isZero();
