@@ -135,7 +135,7 @@ public final class DeviceChart {
                     Trace.Role.POINTS,
                     2,
                     "published",
-                    "typical, any frequency",
+                    "typical, each at its own frequency",
                     published.stream().map(point -> point[0]).toList(),
                     published.stream().map(point -> point[1]).toList()));
         }

@@ -246,11 +246,12 @@ public final class CompareText {
         Source source = comparison.scenario().source();
         String how = source instanceof CapacitorSource || source instanceof TableSource
                 ? "With a plain resistor as the source"
-                : "Everything else unchanged";
+                : "Best currents found anew at each resistance and all else unchanged";
         if (crossover.resistanceOhms().isEmpty()) {
             String quieter = crossover.bipolarQuieterAtLeastResistance() ? bipolar : jfet;
             return how + ", the best bipolar candidate " + bipolar + " and the best JFET candidate " + jfet
-                    + " do not change places from 1 Ω to 10 MΩ: the quieter is " + quieter + " throughout.";
+                    + " do not change places from 1 Ω to 10 MΩ: of these two the quieter is "
+                    + quieter + " throughout.";
         }
         String places = crossover.resistanceOhms().stream()
                 .map(ohms -> Words.value(ohms, "Ω"))

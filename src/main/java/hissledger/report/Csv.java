@@ -9,6 +9,7 @@ import hissledger.choose.Scenario;
 import hissledger.choose.Target;
 import hissledger.ledger.Entry;
 import hissledger.ledger.EntrySpectrum;
+import hissledger.ledger.Figure;
 import hissledger.ledger.Totals;
 import hissledger.physics.Decibels;
 import hissledger.physics.Weighting;
@@ -43,7 +44,12 @@ public final class Csv {
                         "strongestEntry",
                         "strongestEntrySaves_dB",
                         "totalCurrent_A",
-                        "targetMargin_dB"));
+                        "targetMargin_dB",
+                        "rankedBy",
+                        "ranked_" + (comparison.figure().isEin() ? "dBu" : "dB"),
+                        "from_Hz",
+                        "to_Hz",
+                        "temperature_K"));
         Target target = comparison.scenario().target();
         for (Evaluation evaluation : comparison.ranked()) {
             Totals totals = evaluation.ledger().totals();
@@ -67,15 +73,35 @@ public final class Csv {
                             strongest.name(),
                             number(strongest.savesDecibels()),
                             number(evaluation.ledger().frontEnd().stage().totalAmps()),
-                            number(evaluation.marginDecibels(target))));
+                            number(evaluation.marginDecibels(target)),
+                            comparison.figure().key(),
+                            number(ranked(evaluation, comparison.figure())),
+                            number(comparison.scenario().band().fromHertz()),
+                            number(comparison.scenario().band().toHertz()),
+                            number(comparison.scenario().temperatureKelvin())));
         }
         return text.toString();
     }
 
-    /** One row an entry of each candidate, largest first. */
+    private static OptionalDouble ranked(Evaluation evaluation, Figure figure) {
+        OptionalDouble value = evaluation.ledger().figure(figure);
+        return figure.isEin() && value.isPresent() ? OptionalDouble.of(Decibels.dbu(value.getAsDouble())) : value;
+    }
+
+    /** One row an entry of each candidate, largest first; all at the source's EMF, stage and path at the temperature. */
     public static String ledger(Scenario scenario, List<Evaluation> evaluations) {
         StringBuilder text = new StringBuilder();
-        List<String> header = new ArrayList<>(List.of("candidate", "entry", "kind", "band_V", "share", "saves_dB"));
+        List<String> header = new ArrayList<>(List.of(
+                "candidate",
+                "entry",
+                "kind",
+                "weighting",
+                "from_Hz",
+                "to_Hz",
+                "temperature_K",
+                "band_V",
+                "share",
+                "saves_dB"));
         scenario.spotsHertz().forEach(spot -> header.add("at_" + number(spot) + "_Hz_V_rtHz"));
         record(text, header);
         for (Evaluation evaluation : evaluations) {
@@ -84,6 +110,10 @@ public final class Csv {
                         evaluation.name(),
                         entry.name(),
                         entry.source().kind().label(),
+                        evaluation.ledger().weighting().label(),
+                        number(scenario.band().fromHertz()),
+                        number(scenario.band().toHertz()),
+                        number(scenario.temperatureKelvin()),
                         number(entry.bandVolts()),
                         number(entry.share()),
                         number(entry.savesDecibels())));

@@ -161,8 +161,12 @@ class MainTest {
     @Test
     void aDashSendsDataToStandardOutputInPlaceOfTheText() {
         Outcome outcome = run("ledger", VOCAL, "--csv", "-");
-        assertThat(outcome.out()).startsWith("candidate,entry,kind,band_V,share,saves_dB,at_100.0_Hz_V_rtHz");
+        assertThat(outcome.out())
+                .startsWith("candidate,entry,kind,weighting,from_Hz,to_Hz,temperature_K,band_V,share,saves_dB,"
+                        + "at_100.0_Hz_V_rtHz");
         assertThat(outcome.out()).doesNotContain("Low-output moving-coil");
+        assertThat(run("ledger", VOCAL, "--by", "einA", "--csv", "-").out())
+                .contains(",source,source,A,20.0,20000.0,300.15,");
     }
 
     @Test

@@ -145,7 +145,7 @@ class ResultContractTest {
         assertThat(csv.split("\r\n", -1)).hasSize(read.candidates().size() + 2);
         assertThat(csv).contains("\"electrometer JFET, 1 Gohm\",2n4117a,follower");
         for (String line : csv.lines().toList()) {
-            assertThat(line.replaceAll("\"[^\"]*\"", "").split(",", -1)).hasSize(16);
+            assertThat(line.replaceAll("\"[^\"]*\"", "").split(",", -1)).hasSize(21);
         }
     }
 }
